@@ -1,0 +1,49 @@
+import { z } from 'zod';
+
+export const roleSchema = z.enum(['standards-manager', 'engineer', 'drafter', 'admin']);
+export type Role = z.infer<typeof roleSchema>;
+
+export const idSchema = z.coerce.number().int().positive().max(2 ** 53 - 1);
+export const idParams = z.strictObject({ id: idSchema });
+
+export const revisionStateSchema = z.enum([
+  'draft',
+  'swept',
+  'in-check',
+  'checked',
+  'published',
+  'locked',
+  'superseded',
+  'withdrawn',
+]);
+export type RevisionState = z.infer<typeof revisionStateSchema>;
+
+/** A person as others see them. */
+export const personRefSchema = z.object({ id: idSchema, name: z.string() });
+export type PersonRef = z.infer<typeof personRefSchema>;
+
+/** RFC 3339 instant in UTC. */
+export const instantSchema = z.string();
+
+export const faultSchema = z.object({
+  /** Path of the field, e.g. `definition.parameters.pitch.to`. */
+  field: z.string(),
+  message: z.string(),
+  value: z.unknown().optional(),
+});
+export type Fault = z.infer<typeof faultSchema>;
+
+/** RFC 9457 problem details, with every fault listed. */
+export const problemSchema = z.object({
+  type: z.string(),
+  title: z.string(),
+  status: z.number().int(),
+  code: z.string(),
+  detail: z.string().optional(),
+  instance: z.string().optional(),
+  requestId: z.string().optional(),
+  errors: z.array(faultSchema).optional(),
+  /** For conflicts: the version that won. */
+  current: z.unknown().optional(),
+});
+export type Problem = z.infer<typeof problemSchema>;

@@ -1,0 +1,63 @@
+import { z } from 'zod';
+
+/**
+ * A family's definition: the kind, the basis, and how each parameter varies.
+ * It is frozen with a revision, and its hash (canonical JSON, SHA-256) names it.
+ */
+export const parameterValueSchema = z.union([
+  z.number(),
+  z.string().max(80),
+  z.boolean(),
+  z.record(z.string().max(40), z.union([z.number(), z.string().max(80)])),
+]);
+
+export const LIMITS = {
+  values: 500,
+  variants: 1_000_000,
+  cells: 20_000_000,
+  angles: 721,
+  increments: [0.1, 0.5, 1, 2, 5, 10],
+} as const;
+
+export const parameterSettingSchema = z.discriminatedUnion('mode', [
+  z.strictObject({ mode: z.literal('fixed'), value: parameterValueSchema }),
+  z.strictObject({ mode: z.literal('list'), values: z.array(parameterValueSchema).min(1).max(LIMITS.values) }),
+  z.strictObject({
+    mode: z.literal('range'),
+    from: z.number(),
+    to: z.number(),
+    step: z.number().positive(),
+  }),
+]);
+export type ParameterSetting = z.infer<typeof parameterSettingSchema>;
+
+/** Load angles in degrees. */
+export const angleGridSchema = z.discriminatedUnion('mode', [
+  z.strictObject({
+    mode: z.literal('range'),
+    from: z.number().min(-180).max(180),
+    to: z.number().min(-180).max(180),
+    step: z.number().min(0.25).max(180),
+  }),
+  z.strictObject({ mode: z.literal('list'), values: z.array(z.number().min(-180).max(180)).min(1).max(LIMITS.angles) }),
+]);
+export type AngleGrid = z.infer<typeof angleGridSchema>;
+
+export const senseSchema = z.enum(['tension', 'compression']);
+
+export const definitionSchema = z.strictObject({
+  schema: z.literal(1),
+  kind: z.string().min(1).max(40),
+  basis: z.string().min(1).max(40),
+  parameters: z.record(z.string().max(40), parameterSettingSchema),
+  angles: angleGridSchema,
+  senses: z.array(senseSchema).min(1).max(2),
+  /** Published values are rounded down to this, kN. */
+  increment: z.number().positive().max(100),
+  factors: z.strictObject({
+    gammaM0: z.number().min(0.9).max(2),
+    gammaM1: z.number().min(0.9).max(2),
+    gammaM2: z.number().min(1).max(2),
+  }),
+});
+export type Definition = z.infer<typeof definitionSchema>;
