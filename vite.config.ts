@@ -6,7 +6,11 @@ import { defineConfig } from 'vite';
 const folder = (name: string) => fileURLToPath(new URL(`./${name}`, import.meta.url));
 
 /** The folders that may be named from anywhere; tsconfig.base.json lists the same three. */
-export const alias = { '@shared': folder('shared'), '@catalog': folder('catalog'), '@server': folder('server') };
+export const alias = {
+  '@shared': folder('shared'),
+  '@catalog': folder('catalog'),
+  '@server': folder('server'),
+};
 
 const apiAddress = process.env.BACKMARK_API ?? 'http://127.0.0.1:8080';
 

@@ -1,0 +1,3 @@
+import { stampNodePackages } from './node-packages.mjs';
+
+stampNodePackages();
