@@ -27,6 +27,7 @@ import type {
   SteelRecord,
 } from './types.ts';
 
+export { toEngineCatalogue } from './engine-catalogue.ts';
 export type * from './types.ts';
 
 export const catalogue: Catalogue = deepFreeze({

@@ -1,0 +1,43 @@
+import type { EngineCatalogue } from '@shared/engine/types.ts';
+import { deepFreeze } from './freeze.ts';
+import type { BoltSizeRecord, Catalogue } from './types.ts';
+
+/**
+ * The part of the reference data that a kind computes with, in the engine's own shape.
+ * A bolt size or grade without the values of EN and SANS is left out: those bases cannot use it.
+ */
+export function toEngineCatalogue(catalogue: Catalogue): EngineCatalogue {
+  return deepFreeze({
+    boltSizes: catalogue.bolts.flatMap(boltSize),
+    boltGrades: catalogue.boltGrades.flatMap(({ name, nominal, minimum, source }) =>
+      nominal === null ? [] : [{ name, fyb: nominal.fyb, nominal: nominal.fub, minimum, source }],
+    ),
+    steels: catalogue.steels.map(({ name, bands, source }) => ({
+      name,
+      bands: bands.map(({ tMax, fy, fu }) => ({ tMax, fy, fu })),
+      source,
+    })),
+    electrodes: catalogue.electrodes.map(({ name, xu, source }) => ({ name, xu, source })),
+    sections: [...catalogue.angles.map(angleSection), ...catalogue.flats.map(flatSection)],
+  });
+}
+
+function boltSize({ name, d, As, holes }: BoltSizeRecord): EngineCatalogue['boltSizes'] {
+  const { en, sans } = holes.normal;
+  return en === null || sans === null ? [] : [{ name, d, stressArea: As, hole: { en, sans } }];
+}
+
+function angleSection(record: Catalogue['angles'][number]): EngineCatalogue['sections'][number] {
+  const { name, a, b, t, r1, A, source } = record;
+  return { shape: 'angle', name, longLeg: a, shortLeg: b, thickness: t, rootRadius: r1, area: A, source };
+}
+
+function flatSection({
+  name,
+  b,
+  t,
+  A,
+  source,
+}: Catalogue['flats'][number]): EngineCatalogue['sections'][number] {
+  return { shape: 'flat', name, width: b, thickness: t, area: A, source };
+}
