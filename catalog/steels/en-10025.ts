@@ -7,7 +7,8 @@ const EC3_AC = 'EN 1993-1-1:2005 Table 3.1 with corrigendum AC:2009';
 const structural = {
   products: ['plate', 'section'] as const,
   tMin: 3,
-  evidence: 'yield by thickness seen in published resistance-table notes; tensile from memory',
+  evidence:
+    'from memory; yield of S275 and S355 to 80 mm and of S460 to 100 mm seen in published resistance-table notes',
 };
 const beyond = { field: 'bands above 100 mm', reason: 'not taken up: connection parts do not reach it' };
 
