@@ -1,7 +1,7 @@
 import { createHash } from 'node:crypto';
 import { existsSync, mkdirSync, readFileSync, readdirSync, statSync, writeFileSync } from 'node:fs';
-import { dirname, join } from 'node:path';
-import { inRoot } from './paths.mjs';
+import { dirname, join, relative } from 'node:path';
+import { inRoot, root } from './paths.mjs';
 
 function filesBelow(path) {
   if (!existsSync(path)) return [];
@@ -15,7 +15,7 @@ function filesBelow(path) {
 export function hashOf(names) {
   const hash = createHash('sha256');
   for (const file of names.flatMap((name) => filesBelow(inRoot(name)))) {
-    hash.update(file).update('\0').update(readFileSync(file)).update('\0');
+    hash.update(relative(root, file)).update('\0').update(readFileSync(file)).update('\0');
   }
   return hash.digest('hex');
 }
