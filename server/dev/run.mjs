@@ -1,21 +1,33 @@
 import { spawn } from 'node:child_process';
 import { PlainError } from './output.mjs';
 import { root } from './paths.mjs';
+import { until } from './waiting.mjs';
 
 const running = new Set();
 
-/** Sends a signal to every step that is running now; used when the person stops us during a step. */
-export function stopSteps(signal = 'SIGTERM') {
-  for (const child of running) child.kill(signal);
+function signalGroup(child, signal) {
+  try {
+    process.kill(-child.pid, signal);
+  } catch {
+    // It has just ended by itself.
+  }
+}
+
+/** Ends every step that is running now, with all it started; used when the person stops us during a step. */
+export async function stopSteps() {
+  for (const child of running) signalGroup(child, 'SIGTERM');
+  await until(() => running.size === 0, 2500);
+  for (const child of running) signalGroup(child, 'SIGKILL');
 }
 
 /**
- * Runs one command to its end. Its output goes to standard error unless `stdio` says otherwise.
+ * Runs one command to its end, in a process group of its own so that nothing it starts is left behind.
+ * Its output goes to standard error unless `stdio` says otherwise.
  * @returns {Promise<number>} exit code; 128 when a signal ended it
  */
 export function run(command, args, { env, stdio = ['ignore', 2, 2], cwd = root } = {}) {
   return new Promise((resolve, reject) => {
-    const child = spawn(command, args, { cwd, stdio, env: { ...process.env, ...env } });
+    const child = spawn(command, args, { cwd, stdio, env: { ...process.env, ...env }, detached: true });
     running.add(child);
     child.once('error', (error) => {
       running.delete(child);
@@ -34,7 +46,13 @@ export async function mustRun(what, command, args, options) {
   if (code !== 0) throw new PlainError(`${what} failed (exit code ${code}).`);
 }
 
-/** Passes Ctrl-C and a stop request on to the running step, then ends with its code. */
-export function passSignalsOn() {
-  for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.on(signal, () => stopSteps('SIGTERM'));
+/** Ends this process with the conventional code when it is asked to stop, its steps first. */
+export function stopStepsOnSignals() {
+  for (const [signal, code] of [
+    ['SIGINT', 130],
+    ['SIGTERM', 143],
+    ['SIGHUP', 129],
+  ]) {
+    process.on(signal, () => stopSteps().then(() => process.exit(code)));
+  }
 }

@@ -19,7 +19,7 @@ let stopping = false;
 async function stop(code) {
   if (stopping) return;
   stopping = true;
-  stopSteps();
+  await stopSteps();
   for (const step of undo.reverse()) await Promise.resolve(step()).catch(sayFailure);
   process.exit(code);
 }
