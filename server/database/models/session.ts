@@ -1,0 +1,31 @@
+import { DataTypes, Model, type CreationOptional, type Sequelize } from 'sequelize';
+import type { InferAttributes, InferCreationAttributes } from 'sequelize';
+import { instant, reference } from './columns.ts';
+
+export interface SessionRow extends Model<InferAttributes<SessionRow>, InferCreationAttributes<SessionRow>> {
+  id: string;
+  personId: number;
+  refreshHash: string;
+  previousRefreshHash: CreationOptional<string | null>;
+  createdAt: Date;
+  lastUsedAt: Date;
+  expiresAt: Date;
+  revokedAt: CreationOptional<Date | null>;
+}
+
+/** One sign-in; the refresh token is kept only as its hash. */
+export const defineSession = (sequelize: Sequelize) =>
+  sequelize.define<SessionRow>(
+    'session',
+    {
+      id: { type: DataTypes.CHAR(36), primaryKey: true },
+      personId: reference(),
+      refreshHash: DataTypes.CHAR(64),
+      previousRefreshHash: DataTypes.CHAR(64),
+      createdAt: instant(),
+      lastUsedAt: instant(),
+      expiresAt: instant(),
+      revokedAt: instant(),
+    },
+    { tableName: 'sessions', timestamps: false },
+  );

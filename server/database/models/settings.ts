@@ -1,0 +1,34 @@
+import { DataTypes, Model, type CreationOptional, type Sequelize } from 'sequelize';
+import type { InferAttributes, InferCreationAttributes } from 'sequelize';
+import { lockVersion } from './columns.ts';
+
+export interface Factors {
+  gammaM0: number;
+  gammaM1: number;
+  gammaM2: number;
+}
+export interface SettingsRow extends Model<
+  InferAttributes<SettingsRow>,
+  InferCreationAttributes<SettingsRow>
+> {
+  id: number;
+  firm: string;
+  /** kN to which capacities are rounded down; `increment` is a method of every model. */
+  incrementKn: number;
+  factors: Factors;
+  lockVersion: CreationOptional<number>;
+}
+
+/** The firm's own settings: one row, number 1. */
+export const defineSettings = (sequelize: Sequelize) =>
+  sequelize.define<SettingsRow>(
+    'settings',
+    {
+      id: { type: DataTypes.TINYINT, primaryKey: true },
+      firm: DataTypes.STRING(120),
+      incrementKn: { type: DataTypes.DOUBLE, field: 'increment' },
+      factors: DataTypes.JSON,
+      lockVersion: lockVersion(),
+    },
+    { tableName: 'settings', timestamps: false, version: 'lockVersion' },
+  );
