@@ -1,5 +1,5 @@
 import { createHash } from 'node:crypto';
-import { existsSync, mkdirSync, readFileSync, renameSync, rmSync, writeFileSync } from 'node:fs';
+import { existsSync, lstatSync, mkdirSync, readFileSync, renameSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir, userInfo } from 'node:os';
 import { join } from 'node:path';
 import { PlainError, say } from './output.mjs';
@@ -14,6 +14,10 @@ function shortFolder(folder) {
   const name = createHash('sha256').update(folder).digest('hex').slice(0, 16);
   const short = join(tmpdir(), `backmark-${process.getuid?.() ?? ''}-${name}`);
   mkdirSync(short, { recursive: true, mode: 0o700 });
+  const { uid, mode } = lstatSync(short);
+  if (uid !== userInfo().uid || (mode & 0o777) !== 0o700) {
+    throw new PlainError(`${short} is in the way: it belongs to somebody else or is open to others.`);
+  }
   return short;
 }
 
