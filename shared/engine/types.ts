@@ -60,15 +60,7 @@ export type ParameterValue = number | string | boolean | Readonly<Record<string,
 export type ParameterValues = Readonly<Record<string, ParameterValue>>;
 
 export type ParameterType =
-  | 'length'
-  | 'number'
-  | 'count'
-  | 'choice'
-  | 'steel'
-  | 'boltSize'
-  | 'boltGrade'
-  | 'electrode'
-  | 'section';
+  'length' | 'number' | 'count' | 'choice' | 'steel' | 'boltSize' | 'boltGrade' | 'electrode' | 'section';
 
 export type ParameterGroup = 'support' | 'plate' | 'weld' | 'bolts' | 'member' | 'method';
 
@@ -139,7 +131,14 @@ export interface SheetSection {
 /** Handed to a limit state to write down its working. Values arrive in engine units; the recorder converts. */
 export interface Recorder {
   section(id: string, title: string): void;
-  line(symbol: string, meaning: string, formula: string, value: number | string, unit: string, clause: string): void;
+  line(
+    symbol: string,
+    meaning: string,
+    formula: string,
+    value: number | string,
+    unit: string,
+    clause: string,
+  ): void;
 }
 
 /** Partial factors that a firm may set from its National Annex. Unused by bases that have none. */
@@ -168,7 +167,12 @@ export interface Point {
 export interface DetailGeometry {
   readonly outline: readonly Point[];
   readonly holes: readonly { readonly centre: Point; readonly diameter: number }[];
-  readonly welds: readonly { readonly from: Point; readonly to: Point; readonly leg: number; readonly bothSides: boolean }[];
+  readonly welds: readonly {
+    readonly from: Point;
+    readonly to: Point;
+    readonly leg: number;
+    readonly bothSides: boolean;
+  }[];
   /** Outlines of the connected member's parts in this view, nearest last. */
   readonly member: readonly { readonly outline: readonly Point[]; readonly hidden: boolean }[];
   readonly axis: { readonly from: Point; readonly to: Point };

@@ -1,0 +1,6 @@
+/** The engine's public door: nothing else of this folder is imported from outside it, the sweep apart. */
+export { findKind, kinds } from './kinds/registry.ts';
+export { kilonewtons, toDegrees, toRadians } from './numeric/units.ts';
+export { bases, findBasis } from './standards/registry.ts';
+export * from './types.ts';
+export { ENGINE_VERSION } from './version.ts';

@@ -1,0 +1,124 @@
+import type { BlockPly } from '../../limit-states/block-shear.ts';
+import type { Section, Steel } from '../../types.ts';
+import { type Resolved, steelAt } from '../resolved.ts';
+
+export type Brace = 'back_to_back' | 'star' | 'single' | 'flat';
+
+/** Heel to the only line of bolts, by leg length, mm: common practice of the United Kingdom (from memory). */
+const oneLine: readonly (readonly [leg: number, mark: number])[] = [
+  [40, 23],
+  [45, 25],
+  [50, 28],
+  [60, 35],
+  [65, 35],
+  [70, 40],
+  [75, 45],
+  [80, 45],
+  [90, 50],
+  [100, 55],
+];
+/** Heel to the first of two lines, by leg length, mm: common practice of the United Kingdom (from memory). */
+const twoLines: readonly (readonly [leg: number, mark: number])[] = [
+  [125, 45],
+  [150, 55],
+  [200, 75],
+];
+
+/**
+ * The usual back mark of a leg, mm. Legs between the rows take the next shorter row; above the table one line
+ * stands 0.55 and the first of two lines 0.37 of the leg from the heel; below it 0.57.
+ */
+export function usualBackmark(leg: number, lines: number): number {
+  const table = lines === 1 ? oneLine : twoLines;
+  const last = table.at(-1);
+  if (last !== undefined && leg > last[0]) return Math.round(leg * (lines === 1 ? 0.55 : 0.37));
+  const row = table.findLast(([size]) => size <= leg);
+  return row === undefined ? Math.round(leg * (lines === 1 ? 0.57 : 0.37)) : row[1];
+}
+
+/** The brace, ready for its limit states. mm, mm2, MPa. */
+export interface GussetMember {
+  readonly brace: Brace;
+  readonly section: Section;
+  readonly steel: Steel;
+  /** An angle where the brace is of angles, a flat where it is a flat. */
+  readonly shapeFits: boolean;
+  readonly parts: number;
+  /** Lines of bolts through each part. */
+  readonly linesEach: number;
+  readonly connectedLeg: number;
+  readonly otherLeg: number;
+  readonly thickness: number;
+  readonly rootRadius: number;
+  /** Heel to the first line; for a flat, edge to the first line. */
+  readonly backmark: number;
+  /** Outer line to the toe, or to the edge of a flat. */
+  readonly toeDistance: number;
+  /** Greatest extent across the axis, whichever way an angle is turned. */
+  readonly halfWidth: number;
+  readonly endDistance: number;
+  /** Thickness that one bolt bears on. */
+  readonly bearingThickness: number;
+  readonly block: BlockPly;
+}
+
+/** Reads the brace from checked parameters. `noSteel` stands for a grade without a value at this thickness. */
+export function memberOf(values: Resolved, deduction: number, noSteel: Steel): GussetMember {
+  const brace = values.choice<Brace>('brace');
+  const section = values.section('section');
+  const { thickness } = section;
+  const steel = steelAt(values.steel('member_steel'), thickness, null) ?? noSteel;
+  const rows = values.number('rows');
+  const lines = values.number('lines');
+  const gauge = values.number('gauge');
+  const linesEach = brace === 'star' ? 1 : lines;
+  const legs = legsOf(section, values.choice('connected_leg'));
+  const backmark = backmarkOf(section, legs.connectedLeg, linesEach, gauge, values.number('member_backmark'));
+  const toeDistance = legs.connectedLeg - backmark - (linesEach - 1) * gauge;
+  const parts = brace === 'back_to_back' || brace === 'star' ? 2 : 1;
+  return {
+    ...legs,
+    brace,
+    section,
+    steel,
+    shapeFits: (brace === 'flat') === (section.shape === 'flat'),
+    parts,
+    linesEach,
+    thickness,
+    backmark,
+    toeDistance,
+    halfWidth: halfWidthOf(brace, linesEach, gauge, backmark, toeDistance),
+    endDistance: values.number('member_end_distance'),
+    bearingThickness: brace === 'back_to_back' ? 2 * thickness : thickness,
+    block: {
+      thickness,
+      deduction,
+      fy: steel.fy,
+      fu: steel.fu,
+      rows,
+      lines: linesEach,
+      gauge,
+      angle: section.shape === 'angle',
+    },
+  };
+}
+
+function legsOf(section: Section, connected: string) {
+  if (section.shape === 'flat')
+    return { connectedLeg: section.width, otherLeg: section.width, rootRadius: 0 };
+  const { longLeg, shortLeg, rootRadius } = section;
+  return connected === 'long'
+    ? { connectedLeg: longLeg, otherLeg: shortLeg, rootRadius }
+    : { connectedLeg: shortLeg, otherLeg: longLeg, rootRadius };
+}
+
+function backmarkOf(section: Section, leg: number, lines: number, gauge: number, given: number): number {
+  if (section.shape === 'flat') return (leg - (lines - 1) * gauge) / 2;
+  return given === 0 ? usualBackmark(leg, lines) : given;
+}
+
+function halfWidthOf(brace: Brace, lines: number, gauge: number, backmark: number, toe: number): number {
+  if (brace === 'star') return Math.max(gauge / 2 + toe, backmark - gauge / 2);
+  const half = ((lines - 1) * gauge) / 2;
+  return Math.max(backmark, toe) + half;
+}

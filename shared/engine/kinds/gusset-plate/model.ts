@@ -1,0 +1,174 @@
+import { spreadHalfWidth } from '../../limit-states/whitmore.ts';
+import type { BlockPly } from '../../limit-states/block-shear.ts';
+import type { InclinedGroup } from '../../limit-states/bearing.ts';
+import type {
+  Basis,
+  BearingStrength,
+  BoltInShear,
+  EdgeFinish,
+  FilletStrength,
+  HoleMaking,
+} from '../../standards/basis.ts';
+import type { BoltGrade, Electrode, Steel } from '../../types.ts';
+import { type Resolved, steelAt } from '../resolved.ts';
+import { memberOf, type GussetMember } from './member.ts';
+
+/** Stands for a strength that the catalogue does not have; the rule that says so rejects the detail. */
+const noSteel: Steel = { name: 'none', fy: 1, fu: 1 };
+const noGrade: BoltGrade = { name: 'none', fyb: 1, fub: 1 };
+
+/** Everything about one gusset plate that does not change with the load angle. N, mm, MPa. */
+export interface GussetModel {
+  readonly values: Resolved;
+  readonly basis: Basis;
+  readonly tapered: boolean;
+  readonly thickness: number;
+  readonly plate: Steel;
+  readonly support: Steel;
+  readonly supportThickness: number;
+  readonly missing: {
+    readonly plate: boolean;
+    readonly support: boolean;
+    readonly member: boolean;
+    readonly grade: boolean;
+  };
+  readonly weldLength: number;
+  readonly countedWeld: number;
+  readonly weldLeg: number;
+  readonly electrode: Electrode;
+  readonly halfHeight: number;
+  readonly offset: number;
+  readonly projection: number;
+  /** Half of the cut end of a tapered plate, and its distance along the axis. */
+  readonly cutHalfWidth: number;
+  readonly cutDistance: number;
+  readonly bolt: BoltInShear;
+  readonly rows: number;
+  readonly lines: number;
+  readonly pitch: number;
+  readonly gauge: number;
+  readonly halfGauge: number;
+  readonly firstRow: number;
+  readonly lastRow: number;
+  readonly spread: number;
+  readonly deduction: number;
+  readonly finish: EdgeFinish;
+  readonly buckling: number;
+  readonly plastic: boolean;
+  readonly fitWaived: boolean;
+  readonly member: GussetMember;
+  readonly fillet: FilletStrength;
+  readonly plateBearing: BearingStrength;
+  readonly memberBearing: BearingStrength;
+  readonly plateBlock: BlockPly;
+  readonly inclined: InclinedGroup;
+}
+
+/** Puts checked parameters and a basis together. */
+export function buildModel(values: Resolved, basis: Basis): GussetModel {
+  const plate = plateOf(values);
+  const layout = layoutOf(values);
+  const bolt = boltOf(values, basis, layout.lastRow - layout.firstRow);
+  const deduction = bolt.holeDiameter + basis.holeAllowance(values.choice<HoleMaking>('hole_making'));
+  const member = memberOf(values, deduction, noSteel);
+  const fillet = basis.fillet({
+    leg: values.number('weld_leg'),
+    xu: values.electrode('electrode').xu,
+    parts: [plate.plate, plate.support],
+    directional: values.choice('weld_method') === 'directional',
+  });
+  const weldLength = values.number('weld_length');
+  const deducted = values.choice('weld_ends') === 'deducted';
+  const { thickness } = plate;
+  const { fy, fu } = plate.plate;
+  const halfHeight = weldLength / 2;
+  const { rows, lines, gauge } = layout;
+  const lap = {
+    ...bolt,
+    normalHole: normalHole(values, basis),
+    singleLapOneRow: bolt.planes === 1 && rows === 1,
+  };
+  const projection = values.number('projection');
+  const offset = values.number('work_line_offset');
+  return {
+    ...plate,
+    ...layout,
+    values,
+    basis,
+    missing: {
+      plate: plate.plate === noSteel,
+      support: plate.support === noSteel,
+      member: member.steel === noSteel,
+      grade: bolt.grade === noGrade,
+    },
+    tapered: values.choice('outline') === 'tapered',
+    weldLength,
+    countedWeld: Math.max(1, weldLength - (deducted ? fillet.runOut : 0)),
+    weldLeg: values.number('weld_leg'),
+    electrode: values.electrode('electrode'),
+    halfHeight,
+    offset,
+    projection,
+    cutHalfWidth: layout.halfGauge + values.number('gusset_edge_distance'),
+    cutDistance: layout.lastRow + values.number('gusset_end_distance'),
+    bolt,
+    deduction,
+    finish: values.choice<EdgeFinish>('edge_finish'),
+    buckling: values.number('buckling_k'),
+    plastic: values.choice('plate_section') === 'plastic',
+    fitWaived: values.choice('fit_checks') === 'waived',
+    member,
+    fillet,
+    plateBearing: basis.bearing({ ...lap, thickness, fu }),
+    memberBearing: basis.bearing({ ...lap, thickness: member.bearingThickness, fu: member.steel.fu }),
+    plateBlock: { thickness, deduction, fy, fu, rows, lines, gauge, angle: false },
+    inclined: { ...layout, offset, projection, halfHeight },
+  };
+}
+
+function plateOf(values: Resolved) {
+  const thickness = values.number('plate_thickness');
+  const plate = steelAt(values.steel('plate_steel'), thickness, null) ?? noSteel;
+  const supportThickness = values.number('support_thickness');
+  const at = supportThickness === 0 ? thickness : supportThickness;
+  const support = steelAt(values.steel('support_steel'), at, plate) ?? noSteel;
+  return { thickness, plate, support, supportThickness };
+}
+
+function layoutOf(values: Resolved) {
+  const rows = values.number('rows');
+  const lines = values.number('lines');
+  const pitch = values.number('pitch');
+  const gauge = values.number('gauge');
+  const firstRow = values.number('first_row');
+  return {
+    rows,
+    lines,
+    pitch,
+    gauge,
+    halfGauge: lines === 2 ? gauge / 2 : 0,
+    firstRow,
+    lastRow: firstRow + (rows - 1) * pitch,
+    spread: spreadHalfWidth(rows, pitch, lines, gauge),
+  };
+}
+
+function normalHole(values: Resolved, basis: Basis): number {
+  const { size, catalogued } = values.size('bolt_size');
+  return basis.normalHole(size, catalogued);
+}
+
+function boltOf(values: Resolved, basis: Basis, jointLength: number): BoltInShear {
+  const { size } = values.size('bolt_size');
+  const choice = values.grade('bolt_grade');
+  const grade = 'given' in choice ? choice.given : basis.grade(choice.catalogued, size.d);
+  const hole = values.number('hole_diameter');
+  return {
+    size,
+    grade: grade ?? noGrade,
+    holeDiameter: hole === 0 ? normalHole(values, basis) : hole,
+    planes: values.choice('brace') === 'back_to_back' ? 2 : 1,
+    threadsInPlane: values.choice('threads') === 'in_plane',
+    jointLength,
+  };
+}

@@ -1,0 +1,14 @@
+import type { DetailKind, KindId } from '../types.ts';
+import { gussetPlate } from './gusset-plate/index.ts';
+
+/** Every kind of detail. A new one is a folder and a line here. */
+const registry: Readonly<Record<KindId, DetailKind>> = {
+  'gusset-plate': gussetPlate,
+};
+
+export const kinds: readonly DetailKind[] = Object.values(registry);
+
+/** The kind of that name, or undefined when there is none. */
+export function findKind(id: string): DetailKind | undefined {
+  return kinds.find((kind) => kind.id === id);
+}

@@ -1,0 +1,164 @@
+import type {
+  BasisId,
+  BasisInfo,
+  BoltGrade,
+  BoltSize,
+  EngineCatalogue,
+  PartialFactors,
+  Recorder,
+  Steel,
+} from '../types.ts';
+
+/** A recorder, or null in a sweep. */
+export type Rec = Recorder | null;
+
+export type CatalogueGrade = EngineCatalogue['boltGrades'][number];
+export type CatalogueBoltSize = EngineCatalogue['boltSizes'][number];
+export type HoleMaking = 'punched' | 'drilled';
+export type EdgeFinish = 'sheared' | 'rolled';
+
+/** The checks that a limit state can ask of a basis; each basis names its clause. */
+export type ClauseKey =
+  | 'filletMetal'
+  | 'filletBaseMetal'
+  | 'plateSection'
+  | 'boltShear'
+  | 'bearing'
+  | 'blockShear'
+  | 'tensionSection'
+  | 'compression'
+  | 'memberNet'
+  | 'memberGross';
+
+/** One bolt in shear. mm, mm2, MPa. */
+export interface BoltInShear {
+  readonly size: BoltSize;
+  readonly grade: BoltGrade;
+  readonly holeDiameter: number;
+  readonly planes: number;
+  readonly threadsInPlane: boolean;
+  /** Between the end fasteners, along the force. */
+  readonly jointLength: number;
+}
+
+/** The ply that a bolt bears on. */
+export interface BearingPly {
+  readonly size: BoltSize;
+  readonly grade: BoltGrade;
+  readonly holeDiameter: number;
+  readonly normalHole: number;
+  readonly thickness: number;
+  readonly fu: number;
+  /** A single lap joint with one row of bolts across the force. */
+  readonly singleLapOneRow: boolean;
+}
+
+/** Bearing and tear-out of one bolt on one ply. */
+export interface BearingStrength {
+  /**
+   * Design strength, N. `end`: centre to the free end ahead; `pitch`: to the next bolt ahead; `edge`: to the
+   * nearest edge beside; `gauge`: to the next bolt beside. Infinity where there is none.
+   */
+  bolt(end: number, pitch: number, edge: number, gauge: number, rec: Rec): number;
+}
+
+/** One fillet. */
+export interface FilletSpec {
+  readonly leg: number;
+  readonly xu: number;
+  readonly parts: readonly Steel[];
+  readonly directional: boolean;
+}
+
+/** Strength of one fillet under a force per millimetre: `pull` across its axis, `shear` along it, N/mm. */
+export interface FilletStrength {
+  readonly hasBaseMetalCheck: boolean;
+  metalUtilisation(pull: number, shear: number, rec: Rec): number;
+  baseMetalUtilisation(pull: number, shear: number, rec: Rec): number;
+  /** Taken off the length at the two ends together when the weld runs out before its ends, mm. */
+  readonly runOut: number;
+}
+
+/** An angle bolted by one leg, tension. Areas mm2, lengths mm. */
+export interface AngleByOneLeg {
+  readonly area: number;
+  readonly thickness: number;
+  readonly connectedLeg: number;
+  readonly otherLeg: number;
+  readonly rows: number;
+  /** Bolts across the force in the connected leg. */
+  readonly lines: number;
+  readonly pitch: number;
+  readonly toeDistance: number;
+  readonly holeDiameter: number;
+  /** Hole as deducted from a net area. */
+  readonly deduction: number;
+  readonly fu: number;
+}
+
+/** Limits of spacing, edges and weld sizes. Infinity or 0 where the standard sets none. */
+export interface Detailing {
+  readonly clauses: {
+    readonly pitch: string;
+    readonly edge: string;
+    readonly end: string;
+    readonly weldSize: string;
+    readonly weldLength: string;
+    readonly hole: string;
+  };
+  leastPitch(d: number, d0: number): number;
+  leastGauge(d: number, d0: number): number;
+  greatestPitch(t: number): number;
+  leastEdge(d: number, d0: number, finish: EdgeFinish): number;
+  leastEnd(d: number, d0: number, finish: EdgeFinish, boltsInLine: number): number;
+  greatestEdge(t: number, exposed: boolean): number;
+  /** By the thicker part joined, mm. */
+  leastWeldLeg(thicker: number): number;
+  leastWeldThroat(): number;
+  leastWeldLength(leg: number): number;
+  greatestHole(d: number): number;
+}
+
+/** A design basis with its partial factors in place: what the limit states call. Every strength is factored. */
+export interface Basis {
+  readonly info: BasisInfo;
+  readonly factors: PartialFactors;
+  readonly clauses: Readonly<Record<ClauseKey, string>>;
+  readonly detailing: Detailing;
+  readonly modulus: number;
+  normalHole(size: BoltSize, catalogued: CatalogueBoltSize | null): number;
+  /** Added to a hole's diameter when an area is reduced for it, mm. */
+  holeAllowance(making: HoleMaking): number;
+  /** The strengths of a catalogued grade at a bolt diameter, or null when the grade has none there. */
+  grade(grade: CatalogueGrade, d: number): BoltGrade | null;
+  boltShear(bolt: BoltInShear, rec: Rec): number;
+  bearing(ply: BearingPly): BearingStrength;
+  /** Strength of a group in bearing from that of its bolts, N: number, least, greatest, sum, shear of one bolt. */
+  bearingGroup(count: number, least: number, most: number, sum: number, boltShear: number, rec: Rec): number;
+  fillet(spec: FilletSpec): FilletStrength;
+  /** Design yield stress of a plate section, MPa. */
+  yieldStress(fy: number): number;
+  /** Areas mm2, strengths MPa; `eccentric`: the tension on the block is not uniform. */
+  blockShear(
+    ant: number,
+    agv: number,
+    anv: number,
+    fy: number,
+    fu: number,
+    eccentric: boolean,
+    rec: Rec,
+  ): number;
+  tensionYield(area: number, fy: number, rec: Rec): number;
+  tensionRupture(net: number, fu: number, rec: Rec): number;
+  /** Flexural buckling of a plate strip; `slenderness` is K L / r. */
+  compression(area: number, fy: number, slenderness: number, rec: Rec): number;
+  angleNetSection(angle: AngleByOneLeg, rec: Rec): number;
+}
+
+/** One line of the registry: what a basis is, and how it is made with a firm's partial factors. */
+export interface BasisDefinition {
+  readonly info: BasisInfo;
+  create(factors: PartialFactors): Basis;
+}
+
+export type BasisRegistry = Readonly<Record<BasisId, BasisDefinition>>;
