@@ -4,20 +4,24 @@ import { root } from './paths.mjs';
 import { until } from './waiting.mjs';
 
 const running = new Set();
+let stopped = false;
 
-function signalGroup(child, signal) {
+/** Signals a step and all it started; false when none of them is left. */
+function signalGroup({ pid }, signal) {
   try {
-    process.kill(-child.pid, signal);
+    return process.kill(-pid, signal);
   } catch {
-    // It has just ended by itself.
+    return false;
   }
 }
 
-/** Ends every step that is running now, with all it started; used when the person stops us during a step. */
+/** Ends every step that is running, with all it started, and lets no other begin: the person has stopped us. */
 export async function stopSteps() {
-  for (const child of running) signalGroup(child, 'SIGTERM');
-  await until(() => running.size === 0, 2500);
-  for (const child of running) signalGroup(child, 'SIGKILL');
+  stopped = true;
+  const steps = [...running];
+  for (const step of steps) signalGroup(step, 'SIGTERM');
+  await until(() => steps.every((step) => !signalGroup(step, 0)), 2500);
+  for (const step of steps) signalGroup(step, 'SIGKILL');
 }
 
 /**
@@ -26,6 +30,7 @@ export async function stopSteps() {
  * @returns {Promise<number>} exit code; 128 when a signal ended it
  */
 export function run(command, args, { env, stdio = ['ignore', 2, 2], cwd = root } = {}) {
+  if (stopped) return Promise.reject(new PlainError('Stopped.'));
   return new Promise((resolve, reject) => {
     const child = spawn(command, args, { cwd, stdio, env: { ...process.env, ...env }, detached: true });
     running.add(child);

@@ -1,6 +1,7 @@
 import { join } from 'node:path';
 import { prepareData, startProgram } from './application.mjs';
 import { loadEnvironmentFile } from './environment.mjs';
+import { waitForDatabase } from './external-database.mjs';
 import { takeLock } from './lock.mjs';
 import { say, sayFailure } from './output.mjs';
 import { dataFolder } from './paths.mjs';
@@ -49,8 +50,8 @@ async function start(folder, lock) {
   await endPreviousProgram(lock.previous);
   await prepare({ database: !process.env.DATABASE_URL, built: true });
   const urls = await startDatabase(folder);
-  if (stopping) return;
   const settings = { ...(await chooseSettings(folder)), DATABASE_URL: urls.application };
+  if (stopping) return;
   const program = startProgram(settings);
   undo.push(() => endChild(program, programStopsWithin));
   program.once('exit', (code, signal) => {
@@ -60,6 +61,8 @@ async function start(folder, lock) {
   });
   const address = addressOf(settings);
   lock.note({ address, program: program.pid, programBeginning: beginningOf(program.pid) });
+  if (process.env.DATABASE_URL) await waitForDatabase(urls.owner, () => stopping);
+  if (stopping) return;
   await prepareData(settings, urls.owner);
   if (program.connected) program.send('prepared');
 }
