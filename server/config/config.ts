@@ -21,7 +21,7 @@ const publicUrl = z.url({
   protocol: /^https?$/,
   error: 'must be an address such as https://backmark.example',
 });
-const levels = ['fatal', 'error', 'warn', 'info', 'debug', 'silent'] as const;
+const levels = ['fatal', 'error', 'warn', 'info', 'debug', 'trace', 'silent'] as const;
 
 /** Every setting the program reads; `.env.example` explains each. */
 const environmentSchema = z.object({
@@ -40,7 +40,7 @@ const environmentSchema = z.object({
   LOG_LEVEL: z.enum(levels, `must be one of ${levels.join(', ')}`).default('info'),
   TRUST_PROXY: whole(0, 10).default(0),
   RATE_LIMIT_PER_MINUTE: whole(1, 10_000_000).default(12_000),
-  SWEEP_THREADS: whole(1, 64).optional(),
+  SWEEP_WORKERS: whole(1, 64).optional(),
 });
 export const environmentNames = Object.keys(environmentSchema.shape);
 
@@ -59,8 +59,8 @@ export interface Config {
   /** How many proxies stand before the program; their X-Forwarded-For is believed. */
   readonly trustProxy: number;
   readonly rateLimitPerMinute: number;
-  /** Threads that sweep; undefined: as many as the machine has processors, at most 8. */
-  readonly sweepThreads: number | undefined;
+  /** Threads that sweep; undefined: one fewer than the machine has cores, at least one. */
+  readonly sweepWorkers: number | undefined;
 }
 
 /** Thrown with every fault of the settings, a line each. */
@@ -99,6 +99,6 @@ export function loadConfig(environment: NodeJS.ProcessEnv): Config {
     logLevel: values.LOG_LEVEL,
     trustProxy: values.TRUST_PROXY,
     rateLimitPerMinute: values.RATE_LIMIT_PER_MINUTE,
-    sweepThreads: values.SWEEP_THREADS,
+    sweepWorkers: values.SWEEP_WORKERS,
   };
 }

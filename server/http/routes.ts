@@ -1,4 +1,17 @@
+import { routes as audit } from '../features/audit/routes.ts';
+import { routes as auth } from '../features/auth/routes.ts';
+import { routes as health } from '../features/health/routes.ts';
+import { routes as people } from '../features/people/routes.ts';
+import { routes as settings } from '../features/settings/routes.ts';
+import { documentationRoutes } from './documentation.ts';
 import type { RouteDeclaration } from './route.ts';
 
 /** Every route there is: Express, the OpenAPI document and the test of roles and routes read this list. */
-export const allRoutes: readonly RouteDeclaration[] = [];
+export const allRoutes: readonly RouteDeclaration[] = [
+  ...health,
+  ...auth,
+  ...people,
+  ...settings,
+  ...audit,
+  ...documentationRoutes(() => allRoutes),
+];
