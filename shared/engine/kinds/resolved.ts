@@ -21,6 +21,10 @@ export class Resolved {
   choice<T extends string>(name: string): T {
     return this.read(name) as T;
   }
+  /** A choice or a number as it is written in a schema's conditions. */
+  text(name: string): string {
+    return String(this.read(name));
+  }
   steel(name: string): SteelChoice {
     return this.read(name) as SteelChoice;
   }

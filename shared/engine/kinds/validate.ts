@@ -24,12 +24,12 @@ export function validateParameters(
   const faults = unknownNames(specs, given);
   const values = new Map<string, ResolvedValue>();
   for (const spec of specs) {
-    const value = Object.hasOwn(given, spec.name) ? given[spec.name] : undefined;
-    const read = readValue(spec, value ?? spec.default, catalogue);
+    const value = Object.hasOwn(given, spec.name) ? given[spec.name] : spec.default;
+    const read = readValue(spec, value === undefined ? spec.default : value, catalogue);
     if ('fault' in read) {
       faults.push({
         field: spec.name,
-        value: brief(value ?? spec.default),
+        value: brief(value),
         message: `${spec.label}: ${read.fault}`,
       });
     } else values.set(spec.name, read.value);

@@ -122,7 +122,9 @@ export class GussetDetail implements PreparedDetail {
     const found = new Rejections();
     this.view.turn(theta, sense === 'tension');
     this.rules.hold(this.view, found);
-    return [...this.rejections, ...found.list];
+    // The numbers of this angle stand in place of those that hold at every angle.
+    const lasting = this.rejections.filter(({ rule }) => !found.list.some((other) => other.rule === rule));
+    return [...lasting, ...found.list];
   }
 
   /** The hot path: what the angle does not change was worked out before. */

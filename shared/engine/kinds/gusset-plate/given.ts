@@ -1,4 +1,4 @@
-import type { Recorder } from '../../types.ts';
+import type { ParameterSpec, Recorder } from '../../types.ts';
 import type { GussetModel } from './model.ts';
 import { parameters } from './parameters.ts';
 import type { GussetView } from './view.ts';
@@ -6,17 +6,13 @@ import type { GussetView } from './view.ts';
 /** Writes down the inputs and the forces, before the limit states. */
 export function recordGiven(m: GussetModel, v: GussetView, theta: number, rec: Recorder): void {
   rec.section('given', 'Given');
-  for (const spec of parameters) {
-    if (spec.bases !== undefined && !spec.bases.includes(m.basis.info.id)) continue;
-    if (spec.type === 'length' || spec.type === 'number' || spec.type === 'count') {
-      const { when } = spec;
-      const used =
-        when === undefined || when.is.includes(String(m.values[whenReader(when.parameter)](when.parameter)));
-      if (used) rec.line(spec.symbol, spec.label, '', m.values.number(spec.name), spec.unit, '');
-    } else if (spec.type === 'choice') {
+  for (const spec of parameters.filter((one) => isUsed(one, m))) {
+    if (spec.type === 'choice') {
       const value = m.values.choice(spec.name);
       const label = spec.choices?.find((choice) => choice.value === value)?.label ?? value;
       rec.line(spec.symbol, spec.label, '', label, '', '');
+    } else if (spec.type === 'length' || spec.type === 'number' || spec.type === 'count') {
+      rec.line(spec.symbol, spec.label, '', m.values.number(spec.name), spec.unit, '');
     }
   }
   recordCatalogue(m, rec);
@@ -24,9 +20,10 @@ export function recordGiven(m: GussetModel, v: GussetView, theta: number, rec: R
   recordForces(m, v, theta, rec);
 }
 
-/** `lines` is a number, every other parameter that others depend on is a choice. */
-function whenReader(parameter: string): 'number' | 'choice' {
-  return parameter === 'lines' ? 'number' : 'choice';
+/** Whether this basis and these choices use a parameter. */
+function isUsed({ bases, when }: ParameterSpec, m: GussetModel): boolean {
+  if (bases !== undefined && !bases.includes(m.basis.info.id)) return false;
+  return when === undefined || when.is.includes(m.values.text(when.parameter));
 }
 
 function recordCatalogue(m: GussetModel, rec: Recorder): void {

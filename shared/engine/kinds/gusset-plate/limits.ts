@@ -6,7 +6,7 @@ import { whitmoreBuckling, whitmoreTension } from '../../limit-states/whitmore.t
 import type { ClauseKey, Rec } from '../../standards/basis.ts';
 import type { FailingPart } from '../../types.ts';
 import type { GussetModel } from './model.ts';
-import { FACE, type GussetView, LOWER, UPPER } from './view.ts';
+import { FACE, type GussetView, LOWER } from './view.ts';
 
 /** One of the twelve; `clause` names the check that the basis cites for it. */
 interface LimitState {
@@ -99,10 +99,10 @@ export function gussetBearing(m: GussetModel, v: GussetView, oneBolt: number, re
 function edgeBeside(m: GussetModel, v: GussetView): number {
   const { firstRow, lastRow, halfGauge } = m;
   return Math.min(
-    v.inside(UPPER, firstRow, halfGauge) / -v.normalQ[UPPER]!,
-    v.inside(UPPER, lastRow, halfGauge) / -v.normalQ[UPPER]!,
-    v.inside(LOWER, firstRow, -halfGauge) / v.normalQ[LOWER]!,
-    v.inside(LOWER, lastRow, -halfGauge) / v.normalQ[LOWER]!,
+    v.across(firstRow, halfGauge, 1, LOWER),
+    v.across(lastRow, halfGauge, 1, LOWER),
+    v.across(firstRow, -halfGauge, -1, LOWER),
+    v.across(lastRow, -halfGauge, -1, LOWER),
   );
 }
 

@@ -16,6 +16,9 @@ const rule = (id: string, title: string, clause: string, unit: string, least = t
 /** Radius that a nut needs beside its bolt, by bolt diameter: half its width across corners (from memory). */
 const NUT_RADIUS = 0.85;
 
+/** A bolt does not enter a hole that is less than this larger, mm (common practice, from memory). */
+const LEAST_HOLE_CLEARANCE = 0.5;
+
 /** Rules that no load angle changes. */
 export function fixedRejections(m: GussetModel): readonly Rejection[] {
   const found = new Rejections();
@@ -60,8 +63,8 @@ function checkArrangement(m: GussetModel, found: Rejections): void {
   }
   const clause = m.basis.detailing.clauses.hole;
   const greatest = m.basis.detailing.greatestHole(bolt.size.d);
-  // A hole just above the bolt is still one that the bolt does not enter.
-  found.check(rule('hole-least', 'Hole diameter', clause, 'mm'), bolt.holeDiameter, bolt.size.d + 0.1);
+  const least = bolt.size.d + LEAST_HOLE_CLEARANCE;
+  found.check(rule('hole-least', 'Hole diameter', clause, 'mm'), bolt.holeDiameter, least);
   found.check(rule('hole-greatest', 'Hole diameter', clause, 'mm', false), bolt.holeDiameter, greatest);
 }
 
@@ -134,14 +137,14 @@ function checkGussetEdges(m: GussetModel, found: Rejections): void {
   const edge = m.cutHalfWidth - m.halfGauge;
   const most = detailing.greatestEdge(outerThickness(m), isExposed(m));
   const leastEnd = detailing.leastEnd(d, d0, m.finish, m.rows);
-  found.check(rule('gusset-end-least', 'End distance on the gusset', clauses.end, 'mm'), end, leastEnd);
+  found.check(rule('gusset-end', 'End distance on the gusset', clauses.end, 'mm'), end, leastEnd);
   found.check(
     rule('gusset-end-greatest', 'End distance on the gusset', clauses.edge, 'mm', false),
     end,
     most,
   );
   const least = detailing.leastEdge(d, d0, m.finish);
-  found.check(rule('gusset-edge-least', 'Edge distance on the gusset', clauses.edge, 'mm'), edge, least);
+  found.check(rule('gusset-edge', 'Edge distance on the gusset', clauses.edge, 'mm'), edge, least);
 }
 
 function checkWeld(m: GussetModel, found: Rejections): void {
