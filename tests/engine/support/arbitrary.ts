@@ -1,0 +1,62 @@
+import fc from 'fast-check';
+import {
+  findKind,
+  type ParameterSpec,
+  type ParameterValue,
+  type ParameterValues,
+} from '@shared/engine/index.ts';
+import { catalogue } from './gusset.ts';
+
+const parameters = findKind('gusset-plate')?.parameters ?? [];
+
+/** Values that make sense together more often than the whole of each range would. mm. */
+const likely: Readonly<Record<string, readonly [number, number]>> = {
+  plate_thickness: [6, 30],
+  projection: [250, 900],
+  gusset_end_distance: [30, 110],
+  gusset_edge_distance: [30, 130],
+  weld_length: [150, 900],
+  weld_leg: [5, 14],
+  work_line_offset: [-150, 150],
+  pitch: [40, 130],
+  gauge: [40, 130],
+  first_row: [80, 600],
+  rows: [1, 7],
+  hole_diameter: [0, 0],
+  support_thickness: [0, 30],
+  member_backmark: [0, 0],
+  member_end_distance: [30, 80],
+  clearance: [0, 30],
+  buckling_k: [0.5, 2],
+};
+
+function names(type: ParameterSpec['type']): string[] {
+  switch (type) {
+    case 'steel':
+      return catalogue.steels.map(({ name }) => name);
+    case 'boltSize':
+      return catalogue.boltSizes.map(({ name }) => name);
+    case 'boltGrade':
+      return catalogue.boltGrades.map(({ name }) => name);
+    case 'electrode':
+      return catalogue.electrodes.map(({ name }) => name);
+    default:
+      return catalogue.sections.map(({ name }) => name);
+  }
+}
+
+function arbitraryValue(spec: ParameterSpec, wide: boolean): fc.Arbitrary<ParameterValue> {
+  const [minimum, maximum] = (wide ? undefined : likely[spec.name]) ?? [spec.minimum ?? 0, spec.maximum ?? 0];
+  if (spec.type === 'count') return fc.integer({ min: minimum, max: maximum });
+  if (spec.type === 'length' || spec.type === 'number') {
+    return fc.double({ min: minimum, max: maximum, noNaN: true });
+  }
+  if (spec.type === 'choice') return fc.constantFrom(...(spec.choices ?? []).map(({ value }) => value));
+  return fc.constantFrom(...names(spec.type));
+}
+
+/** Parameter values that pass the schema; `wide` draws from the whole of every range. */
+export function gussetValues(wide: boolean): fc.Arbitrary<ParameterValues> {
+  const entries = parameters.map((spec) => [spec.name, arbitraryValue(spec, wide)] as const);
+  return fc.record(Object.fromEntries(entries));
+}
