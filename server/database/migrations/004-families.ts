@@ -1,5 +1,8 @@
 import { createTable, dropTable, exact, foreignKey, type Migration } from './migration.ts';
 
+/** Written so, the column stays text: a plain JSON_VALID(…) check makes the connector hand over an object. */
+const validDefinition = 'CHECK (JSON_VALID(definition) = 1)';
+
 export const families: Migration = {
   name: '004-families',
   up: [
@@ -28,7 +31,7 @@ export const revisions: Migration = {
       'sequence INT NOT NULL',
       `letter VARCHAR(3) ${exact} NULL`,
       `state VARCHAR(12) ${exact} NOT NULL DEFAULT 'draft'`,
-      `definition LONGTEXT ${exact} NOT NULL CHECK (JSON_VALID(definition))`,
+      `definition LONGTEXT ${exact} NOT NULL ${validDefinition}`,
       `definition_hash CHAR(64) ${exact} NOT NULL`,
       `engine_version VARCHAR(20) ${exact} NULL`,
       `content_hash CHAR(64) ${exact} NULL`,
@@ -71,7 +74,7 @@ export const definitionSaves: Migration = {
       'id BIGINT NOT NULL AUTO_INCREMENT PRIMARY KEY',
       'revision_id BIGINT NOT NULL',
       'number INT NOT NULL',
-      `definition LONGTEXT ${exact} NOT NULL CHECK (JSON_VALID(definition))`,
+      `definition LONGTEXT ${exact} NOT NULL ${validDefinition}`,
       `definition_hash CHAR(64) ${exact} NOT NULL`,
       'person_id BIGINT NOT NULL',
       'created_at DATETIME(3) NOT NULL DEFAULT CURRENT_TIMESTAMP(3)',

@@ -1,0 +1,44 @@
+import { setTimeout as delay } from 'node:timers/promises';
+import type { App, Jobs } from './context.ts';
+import { databaseLacks } from './features/health/service.ts';
+
+const longestWait = 5_000;
+const reasons = { preparation: 'the data to be prepared', jobs: 'the workers' } as const;
+
+/** Started by our own start command: it says when the tables and the demo data are there. */
+function prepared(stopping: AbortSignal): Promise<void> {
+  if (!process.send) return Promise.resolve();
+  return new Promise((resolve) => {
+    process.on('message', (message) => {
+      if (message === 'prepared') resolve();
+    });
+    stopping.addEventListener('abort', () => resolve());
+  });
+}
+
+/** Asks the database again and again, waiting longer each time, until its tables fit this program. */
+async function databaseUp(app: App): Promise<void> {
+  let said = '';
+  for (let wait = 100; !app.stopping.aborted; wait = Math.min(wait * 2, longestWait)) {
+    const missing = (await databaseLacks(app)).join(', ');
+    if (missing === '') return;
+    if (missing !== said) app.log.info(`waiting for ${missing}`);
+    said = missing;
+    await delay(wait, undefined, { signal: app.stopping }).catch(() => undefined);
+  }
+}
+
+/**
+ * Waits for the database, its tables and the word of the start command, then starts the queue.
+ * @returns the queue, or null when the program was stopped before
+ */
+export async function bringUp(app: App, startJobs: (app: App) => Promise<Jobs>): Promise<Jobs | null> {
+  for (const reason of Object.values(reasons)) app.readiness.wait(reason);
+  await prepared(app.stopping);
+  app.readiness.done(reasons.preparation);
+  await databaseUp(app);
+  if (app.stopping.aborted) return null;
+  const jobs = await startJobs(app);
+  app.readiness.done(reasons.jobs);
+  return jobs;
+}
