@@ -1,5 +1,5 @@
 import { DataTypes, type CreationOptional, type Sequelize } from 'sequelize';
-import type { InferAttributes, InferCreationAttributes , Model} from 'sequelize';
+import type { InferAttributes, InferCreationAttributes, Model } from 'sequelize';
 import type { RevisionState } from '@shared/contracts/common.ts';
 import { id, instant, lockVersion, reference } from './columns.ts';
 

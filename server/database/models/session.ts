@@ -1,5 +1,5 @@
 import { DataTypes, type CreationOptional, type Sequelize } from 'sequelize';
-import type { InferAttributes, InferCreationAttributes , Model} from 'sequelize';
+import type { InferAttributes, InferCreationAttributes, Model } from 'sequelize';
 import { instant, reference } from './columns.ts';
 
 export interface SessionRow extends Model<InferAttributes<SessionRow>, InferCreationAttributes<SessionRow>> {

@@ -1,5 +1,5 @@
 import { DataTypes, type CreationOptional, type Sequelize } from 'sequelize';
-import type { InferAttributes, InferCreationAttributes , Model} from 'sequelize';
+import type { InferAttributes, InferCreationAttributes, Model } from 'sequelize';
 import { lockVersion } from './columns.ts';
 
 export interface Factors {
