@@ -6,7 +6,7 @@ import { whitmoreBuckling, whitmoreTension } from '../../limit-states/whitmore.t
 import type { ClauseKey, Rec } from '../../standards/basis.ts';
 import type { FailingPart } from '../../types.ts';
 import type { GussetModel } from './model.ts';
-import { FACE, type GussetView, LOWER } from './view.ts';
+import { type GussetView, LOWER, UPPER } from './view.ts';
 
 /** One of the twelve; `clause` names the check that the basis cites for it. */
 interface LimitState {
@@ -95,14 +95,15 @@ export function gussetBearing(m: GussetModel, v: GussetView, oneBolt: number, re
   );
 }
 
-/** Least distance across the brace from a bolt to a side of the plate, mm. */
+/** Least distance across the brace from a bolt to the side of the plate that faces it, mm. */
 function edgeBeside(m: GussetModel, v: GussetView): number {
   const { firstRow, lastRow, halfGauge } = m;
+  // A side that runs square across the brace faces no bolt; the rules admit none that leans further.
+  const upper = Math.max(1e-12, -v.normalQ[UPPER]!);
+  const lower = Math.max(1e-12, v.normalQ[LOWER]!);
   return Math.min(
-    v.across(firstRow, halfGauge, 1, LOWER),
-    v.across(lastRow, halfGauge, 1, LOWER),
-    v.across(firstRow, -halfGauge, -1, LOWER),
-    v.across(lastRow, -halfGauge, -1, LOWER),
+    v.leastInside(UPPER, firstRow, lastRow, halfGauge) / upper,
+    v.leastInside(LOWER, firstRow, lastRow, halfGauge) / lower,
   );
 }
 
@@ -120,9 +121,9 @@ export function gussetBlock(m: GussetModel, v: GussetView, rec: Rec): number {
   if (!v.tension) return Infinity;
   const { firstRow, halfGauge } = m;
   const shear1 = v.along(firstRow, -halfGauge);
-  const shear2 = v.along(firstRow, halfGauge);
-  const side1 = v.across(firstRow, -halfGauge, -1, FACE);
-  const side2 = v.across(firstRow, halfGauge, 1, FACE);
+  const shear2 = m.lines === 1 ? shear1 : v.along(firstRow, halfGauge);
+  const side1 = v.across(firstRow, -halfGauge, -1);
+  const side2 = v.across(firstRow, halfGauge, 1);
   return blockCapacity(m.basis, m.plateBlock, shear1, shear2, side1, side2, rec);
 }
 
@@ -140,16 +141,16 @@ export function memberBlock(m: GussetModel, tension: boolean, rec: Rec): number 
 export function whitmore(m: GussetModel, v: GussetView, rec: Rec): number {
   if (!v.tension) return Infinity;
   const { fy, fu } = m.plate;
-  const above = Math.min(m.spread, v.across(m.firstRow, 0, 1, FACE));
-  const below = Math.min(m.spread, v.across(m.firstRow, 0, -1, FACE));
+  const above = Math.min(m.spread, v.across(m.firstRow, 0, 1));
+  const below = Math.min(m.spread, v.across(m.firstRow, 0, -1));
   return whitmoreTension(m.basis, m.thickness, fy, fu, m.lines, m.gauge, m.deduction, above, below, rec);
 }
 
 /** The spread width as a column from the first row to the face, N: compression only. */
 export function gussetBuckling(m: GussetModel, v: GussetView, rec: Rec): number {
   if (v.tension) return Infinity;
-  const above = Math.min(m.spread, v.across(m.firstRow, 0, 1, FACE));
-  const below = Math.min(m.spread, v.across(m.firstRow, 0, -1, FACE));
+  const above = Math.min(m.spread, v.across(m.firstRow, 0, 1));
+  const below = Math.min(m.spread, v.across(m.firstRow, 0, -1));
   return whitmoreBuckling(
     m.basis,
     m.thickness,

@@ -1,6 +1,6 @@
 import { keeps, type Rejections, type Rule } from '../rules.ts';
 import type { GussetModel } from './model.ts';
-import { type GussetView, LOWER, UPPER } from './view.ts';
+import { END, type GussetView, LOWER, UPPER } from './view.ts';
 
 /** Room for a spanner beside a bolt, by bolt diameter, from its centre to a face or a weld (common practice, from memory). */
 const SPANNER_ROOM = 1.25;
@@ -54,7 +54,8 @@ export class AngleRules {
     if (m.tapered && !this.outlineHolds(v, found) && found === null) return false;
     const { firstRow, lastRow, halfGauge, member } = m;
     if (!test(found, this.edge, this.edgeOf(v), this.leastEdge)) return false;
-    const end = Math.min(v.along(lastRow, halfGauge), v.along(lastRow, -halfGauge));
+    let end = v.along(lastRow, halfGauge);
+    if (m.lines === 2) end = Math.min(end, v.along(lastRow, -halfGauge));
     if (!test(found, this.end, end, this.leastEnd)) return false;
     const tilt = Math.abs(v.sin);
     const face = firstRow * v.cos - halfGauge * tilt;
@@ -78,17 +79,11 @@ export class AngleRules {
   /** Least distance of any bolt to an edge that is not welded, mm. */
   private edgeOf(v: GussetView): number {
     const { firstRow, lastRow, halfGauge } = this.m;
-    let least = Infinity;
-    for (let edge = LOWER; edge <= UPPER; edge++) {
-      least = Math.min(
-        least,
-        v.inside(edge, firstRow, halfGauge),
-        v.inside(edge, firstRow, -halfGauge),
-        v.inside(edge, lastRow, halfGauge),
-        v.inside(edge, lastRow, -halfGauge),
-      );
-    }
-    return least;
+    return Math.min(
+      v.leastInside(LOWER, firstRow, lastRow, halfGauge),
+      v.leastInside(END, firstRow, lastRow, halfGauge),
+      v.leastInside(UPPER, firstRow, lastRow, halfGauge),
+    );
   }
 }
 

@@ -47,14 +47,21 @@ export class GussetView {
     return Math.max(0, least);
   }
 
-  /** From a point across the brace to the outline, from edge `first` on, mm. `side` +1 upwards, -1 downwards. */
-  across(s: number, q: number, side: number, first: number): number {
+  /** From a point across the brace to the outline or the face, mm. `side` +1 upwards, -1 downwards. */
+  across(s: number, q: number, side: number): number {
     let least = Infinity;
-    for (let edge = first; edge <= UPPER; edge++) {
+    for (let edge = FACE; edge <= UPPER; edge++) {
       const slope = -side * this.normalQ[edge]!;
       if (slope > 1e-12) least = Math.min(least, this.inside(edge, s, q) / slope);
     }
     return Math.max(0, least);
+  }
+
+  /** Least distance inside an edge over the four corners of a group of bolts, mm. */
+  leastInside(edge: number, from: number, to: number, halfWidth: number): number {
+    const slope = this.normalS[edge]!;
+    const ends = Math.min(slope * from, slope * to);
+    return ends - Math.abs(this.normalQ[edge]!) * halfWidth + this.distance[edge]!;
   }
 
   /** From a point along the brace, towards the support, to the face, mm; 0 behind the face. */
