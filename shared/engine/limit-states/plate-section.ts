@@ -45,8 +45,8 @@ function elasticCapacity(
   const combined = Math.sqrt(normal * normal + 3 * shear * shear);
   if (rec !== null) {
     rec.line('Z', 'section modulus', 't L²/6', modulus, 'mm³', clause);
-    rec.line('σ', 'normal stress for R = 1 N', '|N|/A + |M|/Z', normal, 'MPa per N', clause);
-    rec.line('τ', 'shear stress for R = 1 N', '|V|/A', shear, 'MPa per N', clause);
+    rec.line('σ', 'normal stress of a unit resultant', '|N|/A + |M|/Z', normal, 'MPa per N', clause);
+    rec.line('τ', 'shear stress of a unit resultant', '|V|/A', shear, 'MPa per N', clause);
     rec.line('σ_v', 'combined', '√(σ² + 3τ²)', combined, 'MPa per N', clause);
   }
   return fyd / combined;

@@ -57,7 +57,7 @@ function recordWorst(
   const shear = shearPerMillimetre(v, length);
   rec.line('L', 'counted length of each fillet', '', length, 'mm', '');
   rec.line('y_w', 'worst millimetre, from the middle of the weld', '', worst, 'mm', '');
-  rec.line('f_x', 'pull for R = 1 N, one fillet', 'N/(2L) + M y/(2 L³/12)', pull, 'N/mm per N', '');
-  rec.line('f_y', 'shear for R = 1 N, one fillet', 'V/(2L)', shear, 'N/mm per N', '');
+  rec.line('f_x', 'pull of a unit resultant, one fillet', 'N/(2L) + M y/(2 L³/12)', pull, 'N/mm per N', '');
+  rec.line('f_y', 'shear of a unit resultant, one fillet', 'V/(2L)', shear, 'N/mm per N', '');
   utilisation(fillet, part, pull, shear, rec);
 }

@@ -5,6 +5,8 @@ import { toDegrees } from './units.ts';
 const atTheEdge: Readonly<Record<string, { unit: string; convert: (value: number) => number }>> = {
   N: { unit: 'kN', convert: (value) => value / 1000 },
   'N/mm': { unit: 'kN/mm', convert: (value) => value / 1000 },
+  'N/mm per N': { unit: 'N/mm per kN', convert: (value) => value * 1000 },
+  'MPa per N': { unit: 'MPa per kN', convert: (value) => value * 1000 },
   'N·mm': { unit: 'kN·m', convert: (value) => value / 1e6 },
   rad: { unit: '°', convert: toDegrees },
 };

@@ -119,12 +119,7 @@ export function memberBearing(m: GussetModel, tension: boolean, oneBolt: number,
 /** A block of the gusset torn outwards, N: tension only. */
 export function gussetBlock(m: GussetModel, v: GussetView, rec: Rec): number {
   if (!v.tension) return Infinity;
-  const { firstRow, halfGauge } = m;
-  const shear1 = v.along(firstRow, -halfGauge);
-  const shear2 = m.lines === 1 ? shear1 : v.along(firstRow, halfGauge);
-  const side1 = v.across(firstRow, -halfGauge, -1);
-  const side2 = v.across(firstRow, halfGauge, 1);
-  return blockCapacity(m.basis, m.plateBlock, shear1, shear2, side1, side2, rec);
+  return blockCapacity(m.basis, m.plateBlock, v.shearLower, v.shearUpper, v.sideLower, v.sideUpper, rec);
 }
 
 /** A block of the brace torn towards its own end, N: tension only. */
@@ -141,16 +136,16 @@ export function memberBlock(m: GussetModel, tension: boolean, rec: Rec): number 
 export function whitmore(m: GussetModel, v: GussetView, rec: Rec): number {
   if (!v.tension) return Infinity;
   const { fy, fu } = m.plate;
-  const above = Math.min(m.spread, v.across(m.firstRow, 0, 1));
-  const below = Math.min(m.spread, v.across(m.firstRow, 0, -1));
+  const above = Math.min(m.spread, v.above);
+  const below = Math.min(m.spread, v.below);
   return whitmoreTension(m.basis, m.thickness, fy, fu, m.lines, m.gauge, m.deduction, above, below, rec);
 }
 
 /** The spread width as a column from the first row to the face, N: compression only. */
 export function gussetBuckling(m: GussetModel, v: GussetView, rec: Rec): number {
   if (v.tension) return Infinity;
-  const above = Math.min(m.spread, v.across(m.firstRow, 0, 1));
-  const below = Math.min(m.spread, v.across(m.firstRow, 0, -1));
+  const above = Math.min(m.spread, v.above);
+  const below = Math.min(m.spread, v.below);
   return whitmoreBuckling(
     m.basis,
     m.thickness,

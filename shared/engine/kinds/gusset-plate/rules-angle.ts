@@ -52,11 +52,9 @@ export class AngleRules {
   hold(v: GussetView, found: Rejections | null): boolean {
     const { m } = this;
     if (m.tapered && !this.outlineHolds(v, found) && found === null) return false;
-    const { firstRow, lastRow, halfGauge, member } = m;
+    const { firstRow, halfGauge, member } = m;
     if (!test(found, this.edge, this.edgeOf(v), this.leastEdge)) return false;
-    let end = v.along(lastRow, halfGauge);
-    if (m.lines === 2) end = Math.min(end, v.along(lastRow, -halfGauge));
-    if (!test(found, this.end, end, this.leastEnd)) return false;
+    if (!test(found, this.end, v.end, this.leastEnd)) return false;
     const tilt = Math.abs(v.sin);
     const face = firstRow * v.cos - halfGauge * tilt;
     if (!test(found, this.face, face, this.leastFace)) return false;

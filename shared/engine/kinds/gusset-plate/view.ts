@@ -6,6 +6,9 @@ export const LOWER = 1;
 export const END = 2;
 export const UPPER = 3;
 
+/** An edge that leans less than this runs along the ray and is not met by it. */
+const LEVEL = 1e-12;
+
 /**
  * The plate as one load angle sees it. Positions are s along the line of the brace from where it meets the
  * face, and q across it, so the bolts never move and the edges turn instead. Each edge is a half-plane:
@@ -19,6 +22,17 @@ export class GussetView {
   cos = NaN;
   sin = NaN;
   tension = true;
+  /** From the first row along each line of bolts to the outline: the lower line, the upper line. */
+  shearLower = NaN;
+  shearUpper = NaN;
+  /** From each outer line across the brace to the outline or the face, at the first row. */
+  sideLower = NaN;
+  sideUpper = NaN;
+  /** From the axis across the brace to the outline or the face, at the first row. */
+  below = NaN;
+  above = NaN;
+  /** From the last row along the brace to the outline, the least over its lines. */
+  end = NaN;
 
   constructor(private readonly model: GussetModel) {}
 
@@ -30,31 +44,7 @@ export class GussetView {
     this.set(FACE, this.cos, -this.sin, 0);
     if (this.model.tapered) this.setTapered();
     else this.setRectangular();
-  }
-
-  /** How far inside an edge a point lies, mm. */
-  inside(edge: number, s: number, q: number): number {
-    return this.normalS[edge]! * s + this.normalQ[edge]! * q + this.distance[edge]!;
-  }
-
-  /** From a point along the brace, away from the support, to the outline, mm. */
-  along(s: number, q: number): number {
-    let least = Infinity;
-    for (let edge = FACE; edge <= UPPER; edge++) {
-      const slope = -this.normalS[edge]!;
-      if (slope > 1e-12) least = Math.min(least, this.inside(edge, s, q) / slope);
-    }
-    return Math.max(0, least);
-  }
-
-  /** From a point across the brace to the outline or the face, mm. `side` +1 upwards, -1 downwards. */
-  across(s: number, q: number, side: number): number {
-    let least = Infinity;
-    for (let edge = FACE; edge <= UPPER; edge++) {
-      const slope = -side * this.normalQ[edge]!;
-      if (slope > 1e-12) least = Math.min(least, this.inside(edge, s, q) / slope);
-    }
-    return Math.max(0, least);
+    this.measure();
   }
 
   /** Least distance inside an edge over the four corners of a group of bolts, mm. */
@@ -67,6 +57,35 @@ export class GussetView {
   /** From a point along the brace, towards the support, to the face, mm; 0 behind the face. */
   toFace(s: number, q: number): number {
     return Math.max(0, s - (q * this.sin) / this.cos);
+  }
+
+  /** Casts every ray that the limit states and rules ask for, edge by edge. */
+  private measure(): void {
+    const { firstRow, lastRow, halfGauge } = this.model;
+    this.shearLower = this.shearUpper = this.end = Infinity;
+    this.sideLower = this.sideUpper = this.below = this.above = Infinity;
+    for (let edge = FACE; edge <= UPPER; edge++) {
+      const normalS = this.normalS[edge]!;
+      const normalQ = this.normalQ[edge]!;
+      const middle = normalS * firstRow + this.distance[edge]!;
+      const shift = normalQ * halfGauge;
+      if (normalS < -LEVEL) {
+        const perInside = -1 / normalS;
+        const last = normalS * lastRow + this.distance[edge]! - Math.abs(shift);
+        this.shearLower = Math.min(this.shearLower, (middle - shift) * perInside);
+        this.shearUpper = Math.min(this.shearUpper, (middle + shift) * perInside);
+        this.end = Math.min(this.end, last * perInside);
+      }
+      if (normalQ < -LEVEL) {
+        const perInside = -1 / normalQ;
+        this.sideUpper = Math.min(this.sideUpper, (middle + shift) * perInside);
+        this.above = Math.min(this.above, middle * perInside);
+      } else if (normalQ > LEVEL) {
+        const perInside = 1 / normalQ;
+        this.sideLower = Math.min(this.sideLower, (middle - shift) * perInside);
+        this.below = Math.min(this.below, middle * perInside);
+      }
+    }
   }
 
   private setRectangular(): void {

@@ -71,8 +71,8 @@ export class EnFillet implements FilletStrength {
     const utilisation = filletDirectional(across, across, along, this.fu, this.betaW, this.gammaM2);
     if (rec !== null) {
       this.recordGiven(rec);
-      rec.line('σ_⊥ = τ_⊥', 'on the throat for R = 1 N', 'f_x/(a√2)', across, 'MPa per N', CLAUSE);
-      rec.line('τ_∥', 'on the throat for R = 1 N', 'f_y/a', along, 'MPa per N', CLAUSE);
+      rec.line('σ_⊥ = τ_⊥', 'on the throat of a unit resultant', 'f_x/(a√2)', across, 'MPa per N', CLAUSE);
+      rec.line('τ_∥', 'on the throat of a unit resultant', 'f_y/a', along, 'MPa per N', CLAUSE);
       const limit = this.fu / (this.betaW * this.gammaM2);
       rec.line('f_w,d', 'limit of √(σ_⊥² + 3(τ_⊥² + τ_∥²))', 'f_u/(β_w γ_M2)', limit, 'MPa', CLAUSE);
       rec.line('σ_⊥,d', 'limit of σ_⊥', '0.9 f_u/γ_M2', (0.9 * this.fu) / this.gammaM2, 'MPa', CLAUSE);
@@ -91,7 +91,7 @@ export class EnFillet implements FilletStrength {
       this.recordGiven(rec);
       rec.line(
         'f',
-        'resultant on this millimetre for R = 1 N',
+        'resultant on this millimetre of a unit resultant',
         '√(f_x² + f_y²)',
         force,
         'N/mm per N',

@@ -60,7 +60,7 @@ export class SansFillet implements FilletStrength {
     if (rec !== null) {
       rec.line(
         'f',
-        'resultant on this millimetre for R = 1 N',
+        'resultant on this millimetre of a unit resultant',
         '√(f_x² + f_y²)',
         force,
         'N/mm per N',
@@ -73,7 +73,14 @@ export class SansFillet implements FilletStrength {
   }
 
   private recordMetal(force: number, sine: number, strength: number, rec: NonNullable<Rec>): void {
-    rec.line('f', 'resultant on this millimetre for R = 1 N', '√(f_x² + f_y²)', force, 'N/mm per N', CLAUSE);
+    rec.line(
+      'f',
+      'resultant on this millimetre of a unit resultant',
+      '√(f_x² + f_y²)',
+      force,
+      'N/mm per N',
+      CLAUSE,
+    );
     rec.line('θ_w', 'resultant to the axis of the weld', 'atan(|f_x|/|f_y|)', Math.asin(sine), 'rad', CLAUSE);
     rec.line('X_u', 'strength of the weld metal', '', this.spec.xu, 'MPa', CLAUSE);
     const formula = '0.67 φ_w (z/√2) X_u (1 + 0.5 sin^1.5 θ_w), φ_w = 0.67';
