@@ -1,0 +1,44 @@
+import { findBasis, findKind, kinds } from '@shared/engine/index.ts';
+import type { DetailKind } from '@shared/engine/types.ts';
+import { computed, reactive, ref } from 'vue';
+import { useCatalogueStore } from '../../stores/catalogue.ts';
+import { countsOf, refusalOf } from './counts.ts';
+import type { FamilyDraft } from './draft.ts';
+import { readDraft, type FieldFault } from './read-draft.ts';
+import { usePreview } from './use-preview.ts';
+
+/** The form of a family: what was typed, what it means, its size, and a live sample. */
+export function useFamilyForm(start: FamilyDraft) {
+  const draft = reactive(structuredClone(start)) as FamilyDraft;
+  const saved = ref(JSON.stringify(start));
+  const catalogues = useCatalogueStore();
+  /** Faults that the server found, until the next save. */
+  const serverFaults = ref<readonly FieldFault[]>([]);
+
+  const kind = computed((): DetailKind => findKind(draft.kind) ?? (kinds[0] as DetailKind));
+  const read = computed(() => readDraft(draft, kind.value));
+  const faults = computed(() => [...read.value.faults, ...serverFaults.value]);
+  const counts = computed(() => countsOf(read.value.settings, read.value.angles, draft.senses.length));
+  const tooLarge = computed(() => refusalOf(counts.value));
+  const changed = computed(() => JSON.stringify(draft) !== saved.value);
+  const basis = computed(() => draft.basis);
+  const factors = computed(() => {
+    const own = findBasis(draft.basis)?.defaultFactors ?? { gammaM0: 1, gammaM1: 1, gammaM2: 1.25 };
+    return read.value.definition?.factors ?? own;
+  });
+  const live = usePreview({ kind, basis, read, factors, catalogue: computed(() => catalogues.catalogue) });
+
+  /** Lays another draft into the form. */
+  function take(other: FamilyDraft): void {
+    Object.assign(draft, structuredClone(other));
+  }
+  /** What stands in the form now is what is stored. */
+  function settle(): void {
+    saved.value = JSON.stringify(draft);
+    serverFaults.value = [];
+  }
+
+  return { draft, kind, read, faults, serverFaults, counts, tooLarge, changed, live, take, settle };
+}
+
+export type FamilyForm = ReturnType<typeof useFamilyForm>;

@@ -1,0 +1,88 @@
+import type { Family } from '@shared/contracts/families.ts';
+import type { Revision } from '@shared/contracts/revisions.ts';
+import { ref, shallowRef, toRaw } from 'vue';
+import { createFamily, updateFamily } from '../../api/families.ts';
+import { isConflict, ProblemError } from '../../api/problem.ts';
+import { fetchRevision, saveDefinition } from '../../api/revisions.ts';
+import { useTask } from '../../composables/use-task.ts';
+import { differencesOf, merged, type Difference } from './differences.ts';
+import { draftOf, type FamilyDraft } from './draft.ts';
+import type { FamilyForm } from './use-family-form.ts';
+
+interface Stored {
+  readonly family: Family | null;
+  readonly revision: Revision | null;
+}
+interface Conflict {
+  readonly theirs: FamilyDraft;
+  readonly revision: Revision;
+  readonly differences: readonly Difference[];
+}
+
+/** Saving a family: new or changed, with the answer to somebody who was quicker. */
+export function useFamilySave(form: FamilyForm, start: Stored) {
+  const family = shallowRef(start.family);
+  const revision = shallowRef(start.revision);
+  const conflict = shallowRef<Conflict | null>(null);
+  const conflictOpen = ref(false);
+
+  async function saveNames(): Promise<void> {
+    const { code, title } = form.draft;
+    const stored = family.value;
+    if (!stored || (stored.code === code && stored.title === title)) return;
+    family.value = await updateFamily(stored.id, stored.lockVersion, { code, title });
+  }
+
+  async function showConflict(id: number): Promise<void> {
+    const newer = await fetchRevision(id);
+    const { code, title } = form.draft;
+    const theirs = draftOf(newer.definition, form.kind.value, { code, title });
+    const differences = differencesOf(form.draft, theirs, form.kind.value);
+    conflict.value = { theirs, revision: newer, differences };
+    conflictOpen.value = true;
+  }
+
+  async function store(): Promise<Family | null> {
+    const { definition } = form.read.value;
+    if (!definition || form.tooLarge.value) return null;
+    const { code, title } = form.draft;
+    if (!revision.value) {
+      family.value = await createFamily({ code, title, definition });
+    } else {
+      await saveNames();
+      revision.value = await saveDefinition(revision.value.id, revision.value.lockVersion, definition);
+    }
+    form.settle();
+    return family.value;
+  }
+
+  const task = useTask(async (): Promise<Family | null> => {
+    form.serverFaults.value = [];
+    try {
+      return await store();
+    } catch (fault) {
+      if (isConflict(fault) && revision.value) {
+        await showConflict(revision.value.id);
+        return null;
+      }
+      if (fault instanceof ProblemError) form.serverFaults.value = fault.faults.map(toField);
+      throw fault;
+    }
+  });
+
+  /** Takes the chosen fields from the other version, and saves the whole over it. */
+  async function resolve(fromTheirs: ReadonlySet<string>): Promise<void> {
+    if (!conflict.value) return;
+    form.take(merged(structuredClone(toRaw(form.draft)), conflict.value.theirs, fromTheirs));
+    revision.value = conflict.value.revision;
+    conflictOpen.value = false;
+    await task.run();
+  }
+
+  return { family, revision, conflict, conflictOpen, task, resolve };
+}
+
+/** `definition.parameters.pitch.to` is the form's `pitch.to`. */
+function toField({ field, message }: { field: string; message: string }) {
+  return { field: field.replace(/^(definition\.)?(parameters\.)?/, ''), message };
+}
