@@ -11,6 +11,8 @@ function limiter(limit: number): RequestHandler {
     limit,
     standardHeaders: 'draft-8',
     legacyHeaders: false,
+    // Behind no proxy the header is simply not believed; that is no fault to print.
+    validate: { xForwardedForHeader: false },
     handler: (_req, _res, next) => next(new ProblemError('rate-limited', { retryAfter: 60 })),
   });
 }

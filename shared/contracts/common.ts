@@ -3,7 +3,22 @@ import { z } from 'zod';
 export const roleSchema = z.enum(['standards-manager', 'engineer', 'drafter', 'admin']);
 export type Role = z.infer<typeof roleSchema>;
 
-export const idSchema = z.coerce.number().int().positive().max(2 ** 53 - 1);
+/** In an address an id is digits; nothing else (`1e3`, `true`, a list) is taken for a number. */
+export const idSchema = z
+  .union([
+    z.number(),
+    z
+      .string()
+      .regex(/^[1-9]\d{0,15}$/)
+      .transform(Number),
+  ])
+  .pipe(
+    z
+      .number()
+      .int()
+      .positive()
+      .max(2 ** 53 - 1),
+  );
 export const idParams = z.strictObject({ id: idSchema });
 
 export const revisionStateSchema = z.enum([

@@ -1,5 +1,8 @@
 import jwt from 'jsonwebtoken';
 import { afterAll, beforeAll, beforeEach, describe, expect, test } from 'vitest';
+import type { z } from 'zod';
+import type { demoPeopleResponse } from '@shared/contracts/auth.ts';
+import { addDemoPeople } from '@server/features/people/service.ts';
 import { createHarness, password, type Harness } from './harness.ts';
 
 let harness: Harness;
@@ -257,6 +260,37 @@ describe('a forged access token', () => {
     await me(`${header}.${altered}.${signature}`).expect(401);
     await me(access).expect(200);
   });
+});
+
+test('an unknown address takes as much work as a wrong password', async () => {
+  const took = async (email: string) => {
+    const times: number[] = [];
+    for (let n = 0; n < 5; n += 1) {
+      await harness.db.execute('DELETE FROM sign_in_failures');
+      const began = performance.now();
+      await attempt(email, 'wrong').expect(401);
+      times.push(performance.now() - began);
+    }
+    return times.sort((a, b) => a - b)[2] ?? 0;
+  };
+  const ratio = (await took('nobody@harrowquay.example')) / (await took(engineer().email));
+  // Without the decoy hash it is about a tenth.
+  expect(ratio).toBeGreaterThan(0.4);
+  expect(ratio).toBeLessThan(2.5);
+});
+
+test('the demo people are shown in demo mode alone, and can sign in there', async () => {
+  await harness.stranger().get('/api/auth/demo-people').expect(404);
+  const demo = await createHarness({ BACKMARK_DEMO: 'true' });
+  await demo.db.execute('DELETE FROM people');
+  expect(await addDemoPeople(demo.app)).toBe(4);
+  expect(await addDemoPeople(demo.app)).toBe(0);
+  const { body } = await demo.stranger().get('/api/auth/demo-people').expect(200);
+  for (const { email, password: secret, role } of (body as z.output<typeof demoPeopleResponse>).people) {
+    const agent = await demo.signIn(email, secret);
+    expect((await agent.get('/api/auth/me')).body).toMatchObject({ role });
+  }
+  await demo.close();
 });
 
 test('no password, cookie or token is in the log', async () => {
