@@ -17,8 +17,15 @@ const clientFolder = (): string => {
   return fileURLToPath(new URL(built ? '../client' : '../dist/client', import.meta.url));
 };
 
-/** The whole application without listening: tests use it as it is. */
-export function createApp(app: App, routes: readonly RouteDeclaration[] = allRoutes): Express {
+/**
+ * The whole application without listening: tests use it as it is.
+ * @param client folder of the built client
+ */
+export function createApp(
+  app: App,
+  routes: readonly RouteDeclaration[] = allRoutes,
+  client: string = clientFolder(),
+): Express {
   const server = express();
   server.disable('x-powered-by');
   server.set('etag', false);
@@ -31,7 +38,7 @@ export function createApp(app: App, routes: readonly RouteDeclaration[] = allRou
   server.use(['/api/auth/sign-in', '/api/auth/refresh', '/api/auth/password'], limits.signIn);
   server.use(cookieParser());
   server.use(mountRoutes(app, routes));
-  server.use(staticFiles(clientFolder()));
+  server.use(staticFiles(client));
   server.use(errorHandler(app));
   return server;
 }
