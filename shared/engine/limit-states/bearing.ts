@@ -81,27 +81,27 @@ export function inclinedBearing(
     most = Math.max(most, strength);
     sum += strength;
   }
-  if (rec !== null) {
-    rec.line(
-      '',
-      'method',
-      '√((F_x/R_bx)² + (F_y/R_by)²) ≤ 1',
-      'resolved along the edges',
-      '',
-      'method of this catalogue',
-    );
-    rec.line(
-      '',
-      'weakest bolt',
-      '',
-      `row ${Math.floor(weakest / lines) + 1}, line ${(weakest % lines) + 1}`,
-      '',
-      '',
-    );
-    inclinedBolt(ply, group, weakest, cos, sin, sign, rec);
-    rec.line('R_b,min', 'weakest bolt along the force', '', least, 'N', 'method of this catalogue');
-  }
+  if (rec !== null) recordWeakest(ply, group, weakest, cos, sin, sign, least, rec);
   return basis.bearingGroup(rows * lines, least, most, sum, boltShear, rec);
+}
+
+function recordWeakest(
+  ply: BearingStrength,
+  group: InclinedGroup,
+  weakest: number,
+  cos: number,
+  sin: number,
+  sign: number,
+  strength: number,
+  rec: NonNullable<Rec>,
+): void {
+  const method = 'method of this catalogue';
+  const { lines } = group;
+  const place = `row ${Math.floor(weakest / lines) + 1}, line ${(weakest % lines) + 1}`;
+  rec.line('', 'method', '√((F_x/R_bx)² + (F_y/R_by)²) ≤ 1', 'resolved along the edges', '', method);
+  rec.line('', 'weakest bolt; R_bx first, then R_by', '', place, '', '');
+  inclinedBolt(ply, group, weakest, cos, sin, sign, rec);
+  rec.line('R_b,min', 'weakest bolt along the force', '', strength, 'N', method);
 }
 
 function inclinedBolt(
@@ -126,9 +126,7 @@ function inclinedBolt(
   const toFree = group.projection - x;
   const toTop = halfHeight - y;
   const toBottom = halfHeight + y;
-  if (rec !== null) rec.line('', 'along x', '', '', '', '');
   const rx = ply.bolt(sign > 0 ? toFree : Infinity, pitch, Math.min(toTop, toBottom), gauge, rec);
-  if (rec !== null) rec.line('', 'along y', '', '', '', '');
   const ry = ply.bolt(sign * sin > 0 ? toTop : toBottom, pitch, toFree, gauge, rec);
   const ux = cos / rx;
   const uy = sin / ry;

@@ -94,11 +94,21 @@ function block(
   const ant = thickness * Math.max(0, tension - tensionHoles * deduction);
   const agv = thickness * shear;
   const anv = thickness * Math.max(0, shear - planes * (rows - 0.5) * deduction);
-  if (rec !== null) {
-    rec.line('', name, '', '', '', '');
-    rec.line('A_nt', 'net area in tension', 't (length − holes)', ant, 'mm²', basis.clauses.blockShear);
-    rec.line('A_gv', 'gross area in shear', 't × length', agv, 'mm²', basis.clauses.blockShear);
-    rec.line('A_nv', 'net area in shear', 't (length − (n − ½) holes)', anv, 'mm²', basis.clauses.blockShear);
-  }
+  if (rec !== null) recordBlock(basis, name, ant, agv, anv, rec);
   return basis.blockShear(ant, agv, anv, ply.fy, ply.fu, eccentric, rec);
+}
+
+function recordBlock(
+  basis: Basis,
+  name: string,
+  ant: number,
+  agv: number,
+  anv: number,
+  rec: NonNullable<Rec>,
+): void {
+  const clause = basis.clauses.blockShear;
+  rec.line('', name, '', '', '', '');
+  rec.line('A_nt', 'net area in tension', 't (length − holes)', ant, 'mm²', clause);
+  rec.line('A_gv', 'gross area in shear', 't × length', agv, 'mm²', clause);
+  rec.line('A_nv', 'net area in shear', 't (length − (n − ½) holes)', anv, 'mm²', clause);
 }

@@ -43,13 +43,22 @@ function elasticCapacity(
   const normal = Math.abs(n) / area + Math.abs(m) / modulus;
   const shear = Math.abs(v) / area;
   const combined = Math.sqrt(normal * normal + 3 * shear * shear);
-  if (rec !== null) {
-    rec.line('Z', 'section modulus', 't L²/6', modulus, 'mm³', clause);
-    rec.line('σ', 'normal stress of a unit resultant', '|N|/A + |M|/Z', normal, 'MPa per N', clause);
-    rec.line('τ', 'shear stress of a unit resultant', '|V|/A', shear, 'MPa per N', clause);
-    rec.line('σ_v', 'combined', '√(σ² + 3τ²)', combined, 'MPa per N', clause);
-  }
+  if (rec !== null) recordElastic(modulus, normal, shear, combined, clause, rec);
   return fyd / combined;
+}
+
+function recordElastic(
+  modulus: number,
+  normal: number,
+  shear: number,
+  combined: number,
+  clause: string,
+  rec: NonNullable<Rec>,
+): void {
+  rec.line('Z', 'section modulus', 't L²/6', modulus, 'mm³', clause);
+  rec.line('σ', 'normal stress of a unit resultant', '|N|/A + |M|/Z', normal, 'MPa per N', clause);
+  rec.line('τ', 'shear stress of a unit resultant', '|V|/A', shear, 'MPa per N', clause);
+  rec.line('σ_v', 'combined', '√(σ² + 3τ²)', combined, 'MPa per N', clause);
 }
 
 function plasticCapacity(

@@ -67,17 +67,29 @@ export function whitmoreBuckling(
   const area = thickness * (above + below);
   const length = (middle + upper + lower) / 3;
   const slenderness = (k * length * Math.sqrt(12)) / thickness;
-  if (rec !== null) {
-    const clause = basis.clauses.compression;
-    recordWidth(above, below, rec);
-    rec.line('A', 'section', 't (w_1 + w_2)', area, 'mm²', clause);
-    rec.line('L_1', 'middle of the width to the face', '', middle, 'mm', '');
-    rec.line('L_2', 'upper end to the face', '', upper, 'mm', '');
-    rec.line('L_3', 'lower end to the face', '', lower, 'mm', '');
-    rec.line('L_m', 'mean', '(L_1 + L_2 + L_3)/3', length, 'mm', '');
-    rec.line('K L/r', 'r = t/√12', 'K L_m √12/t', slenderness, '', clause);
-  }
+  if (rec !== null) recordStrip(basis, area, above, below, middle, upper, lower, slenderness, rec);
   return basis.compression(area, fy, slenderness, rec);
+}
+
+function recordStrip(
+  basis: Basis,
+  area: number,
+  above: number,
+  below: number,
+  middle: number,
+  upper: number,
+  lower: number,
+  slenderness: number,
+  rec: NonNullable<Rec>,
+): void {
+  const clause = basis.clauses.compression;
+  recordWidth(above, below, rec);
+  rec.line('A', 'section', 't (w_1 + w_2)', area, 'mm²', clause);
+  rec.line('L_1', 'middle of the width to the face', '', middle, 'mm', '');
+  rec.line('L_2', 'upper end to the face', '', upper, 'mm', '');
+  rec.line('L_3', 'lower end to the face', '', lower, 'mm', '');
+  rec.line('L_m', 'mean', '(L_1 + L_2 + L_3)/3', (middle + upper + lower) / 3, 'mm', '');
+  rec.line('K L/r', 'r = t/√12', 'K L_m √12/t', slenderness, '', clause);
 }
 
 function recordWidth(above: number, below: number, rec: NonNullable<Rec>): void {

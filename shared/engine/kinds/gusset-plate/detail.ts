@@ -1,5 +1,4 @@
 import { SheetRecorder } from '../../numeric/recorder.ts';
-import { kilonewtons } from '../../numeric/units.ts';
 import type { Rec } from '../../standards/basis.ts';
 import {
   type CellOutcome,
@@ -177,7 +176,6 @@ export class GussetDetail implements PreparedDetail {
     rec.line('', 'governing limit state', '', `${state?.code}  ${state?.title}`, '', state?.clause ?? '');
     const label = this.model.basis.info.resultLabel;
     rec.line('R', label, 'the least of the above', capacity, 'N', '');
-    rec.line('', 'in words', '', `${kilonewtons(capacity).toFixed(1)} kN before rounding down`, '', '');
   }
 
   private recordNotes(rec: NonNullable<Rec>): void {

@@ -20,8 +20,13 @@ export function recordGiven(m: GussetModel, v: GussetView, theta: number, rec: R
   recordForces(m, v, theta, rec);
 }
 
+/** Lengths that may be left to the usual value. */
+const usual: ReadonlySet<string> = new Set(['hole_diameter', 'member_backmark', 'support_thickness']);
+
 /** Whether this basis and these choices use a parameter. */
-function isUsed({ bases, when }: ParameterSpec, m: GussetModel): boolean {
+function isUsed({ name, bases, when }: ParameterSpec, m: GussetModel): boolean {
+  // A length of 0 stands for the usual one, which is written down with what the catalogue gives.
+  if (usual.has(name) && m.values.number(name) === 0) return false;
   if (bases !== undefined && !bases.includes(m.basis.info.id)) return false;
   return when === undefined || when.is.includes(m.values.text(when.parameter));
 }

@@ -69,14 +69,7 @@ export class EnFillet implements FilletStrength {
     const across = pull / (this.a * Math.SQRT2);
     const along = shear / this.a;
     const utilisation = filletDirectional(across, across, along, this.fu, this.betaW, this.gammaM2);
-    if (rec !== null) {
-      this.recordGiven(rec);
-      rec.line('σ_⊥ = τ_⊥', 'on the throat of a unit resultant', 'f_x/(a√2)', across, 'MPa per N', CLAUSE);
-      rec.line('τ_∥', 'on the throat of a unit resultant', 'f_y/a', along, 'MPa per N', CLAUSE);
-      const limit = this.fu / (this.betaW * this.gammaM2);
-      rec.line('f_w,d', 'limit of √(σ_⊥² + 3(τ_⊥² + τ_∥²))', 'f_u/(β_w γ_M2)', limit, 'MPa', CLAUSE);
-      rec.line('σ_⊥,d', 'limit of σ_⊥', '0.9 f_u/γ_M2', (0.9 * this.fu) / this.gammaM2, 'MPa', CLAUSE);
-    }
+    if (rec !== null) this.recordDirectional(across, along, rec);
     return utilisation;
   }
 
@@ -89,17 +82,19 @@ export class EnFillet implements FilletStrength {
     if (rec !== null) {
       const clause = 'EN 1993-1-8 4.5.3.3';
       this.recordGiven(rec);
-      rec.line(
-        'f',
-        'resultant on this millimetre of a unit resultant',
-        '√(f_x² + f_y²)',
-        force,
-        'N/mm per N',
-        clause,
-      );
+      rec.line('f', 'on this millimetre of a unit resultant', '√(f_x² + f_y²)', force, 'N/mm per N', clause);
       rec.line('f_vw,d', 'shear strength', 'f_u/(√3 β_w γ_M2)', this.simplified, 'MPa', clause);
     }
     return force / (this.simplified * this.a);
+  }
+
+  private recordDirectional(across: number, along: number, rec: NonNullable<Rec>): void {
+    this.recordGiven(rec);
+    rec.line('σ_⊥ = τ_⊥', 'on the throat of a unit resultant', 'f_x/(a√2)', across, 'MPa per N', CLAUSE);
+    rec.line('τ_∥', 'on the throat of a unit resultant', 'f_y/a', along, 'MPa per N', CLAUSE);
+    const limit = this.fu / (this.betaW * this.gammaM2);
+    rec.line('f_w,d', 'limit of √(σ_⊥² + 3(τ_⊥² + τ_∥²))', 'f_u/(β_w γ_M2)', limit, 'MPa', CLAUSE);
+    rec.line('σ_⊥,d', 'limit of σ_⊥', '0.9 f_u/γ_M2', (0.9 * this.fu) / this.gammaM2, 'MPa', CLAUSE);
   }
 
   private recordGiven(rec: NonNullable<Rec>): void {

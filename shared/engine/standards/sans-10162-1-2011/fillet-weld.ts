@@ -57,30 +57,18 @@ export class SansFillet implements FilletStrength {
 
   baseMetalUtilisation(pull: number, shear: number, rec: Rec): number {
     const force = Math.sqrt(pull * pull + shear * shear);
-    if (rec !== null) {
-      rec.line(
-        'f',
-        'resultant on this millimetre of a unit resultant',
-        '√(f_x² + f_y²)',
-        force,
-        'N/mm per N',
-        CLAUSE,
-      );
-      rec.line('f_u', 'tensile strength of the weaker part', '', this.fu, 'MPa', CLAUSE);
-      rec.line('v_m', 'base metal per mm of fillet', '0.67 φ_w z f_u, φ_w = 0.67', this.base, 'N/mm', CLAUSE);
-    }
+    if (rec !== null) this.recordBase(force, rec);
     return force / this.base;
   }
 
+  private recordBase(force: number, rec: NonNullable<Rec>): void {
+    rec.line('f', 'on this millimetre of a unit resultant', '√(f_x² + f_y²)', force, 'N/mm per N', CLAUSE);
+    rec.line('f_u', 'tensile strength of the weaker part', '', this.fu, 'MPa', CLAUSE);
+    rec.line('v_m', 'base metal per mm of fillet', '0.67 φ_w z f_u, φ_w = 0.67', this.base, 'N/mm', CLAUSE);
+  }
+
   private recordMetal(force: number, sine: number, strength: number, rec: NonNullable<Rec>): void {
-    rec.line(
-      'f',
-      'resultant on this millimetre of a unit resultant',
-      '√(f_x² + f_y²)',
-      force,
-      'N/mm per N',
-      CLAUSE,
-    );
+    rec.line('f', 'on this millimetre of a unit resultant', '√(f_x² + f_y²)', force, 'N/mm per N', CLAUSE);
     rec.line('θ_w', 'resultant to the axis of the weld', 'atan(|f_x|/|f_y|)', Math.asin(sine), 'rad', CLAUSE);
     rec.line('X_u', 'strength of the weld metal', '', this.spec.xu, 'MPa', CLAUSE);
     const formula = '0.67 φ_w (z/√2) X_u (1 + 0.5 sin^1.5 θ_w), φ_w = 0.67';
