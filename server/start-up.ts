@@ -28,17 +28,26 @@ async function databaseUp(app: App): Promise<void> {
   }
 }
 
+async function startAll(app: App, services: readonly ((app: App) => Promise<Jobs>)[]): Promise<Jobs> {
+  const started: Jobs[] = [];
+  for (const start of services) started.push(await start(app));
+  return { stop: async () => void (await Promise.all(started.map((service) => service.stop()))) };
+}
+
 /**
- * Waits for the database, its tables and the word of the start command, then starts the queue.
- * @returns the queue, or null when the program was stopped before
+ * Waits for the database, its tables and the word of the start command, then starts what runs beside the requests.
+ * @returns the way to stop it, or null when the program was stopped before
  */
-export async function bringUp(app: App, startJobs: (app: App) => Promise<Jobs>): Promise<Jobs | null> {
+export async function bringUp(
+  app: App,
+  services: readonly ((app: App) => Promise<Jobs>)[],
+): Promise<Jobs | null> {
   for (const reason of Object.values(reasons)) app.readiness.wait(reason);
   await prepared(app.stopping);
   app.readiness.done(reasons.preparation);
   await databaseUp(app);
   if (app.stopping.aborted) return null;
-  const jobs = await startJobs(app);
+  const jobs = await startAll(app, services);
   app.readiness.done(reasons.jobs);
   return jobs;
 }
