@@ -1,5 +1,6 @@
 import { setTimeout as delay } from 'node:timers/promises';
 import type { App, Jobs } from './context.ts';
+import { auditHead } from './features/audit/list-service.ts';
 import { databaseLacks } from './features/health/service.ts';
 
 const longestWait = 5_000;
@@ -47,6 +48,7 @@ export async function bringUp(
   app.readiness.done(reasons.preparation);
   await databaseUp(app);
   if (app.stopping.aborted) return null;
+  app.log.info({ head: await auditHead(app.db) }, 'audit trail');
   const jobs = await startAll(app, services);
   app.readiness.done(reasons.jobs);
   return jobs;

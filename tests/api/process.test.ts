@@ -96,6 +96,7 @@ test('it is alive at once, ready when tables and the word of the start command a
   await migrateDatabase(database.ownerUrl);
   await until(async () => (await at('/api/ready')) === 200);
   await until(() => readyLine.exec(printed())?.[2] === String(port));
+  expect(printed()).toContain(`"head":{"seq":0,"hash":"${'0'.repeat(64)}"}`);
   const began = Date.now();
   child.kill('SIGTERM');
   expect(await exited).toBe(0);

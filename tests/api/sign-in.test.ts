@@ -283,6 +283,7 @@ test('the demo people are shown in demo mode alone, and can sign in there', asyn
   await harness.stranger().get('/api/auth/demo-people').expect(404);
   const demo = await createHarness({ BACKMARK_DEMO: 'true' });
   await demo.db.execute('DELETE FROM people');
+  expect((await demo.stranger().get('/api/auth/demo-people').expect(200)).body).toEqual({ people: [] });
   expect(await addDemoPeople(demo.app)).toBe(4);
   expect(await addDemoPeople(demo.app)).toBe(0);
   const { body } = await demo.stranger().get('/api/auth/demo-people').expect(200);
@@ -290,6 +291,9 @@ test('the demo people are shown in demo mode alone, and can sign in there', asyn
     const agent = await demo.signIn(email, secret);
     expect((await agent.get('/api/auth/me')).body).toMatchObject({ role });
   }
+  await demo.db.execute("UPDATE people SET state = 'disabled' WHERE role = 'drafter'");
+  const fewer = await demo.stranger().get('/api/auth/demo-people').expect(200);
+  expect((fewer.body as { people: unknown[] }).people).toHaveLength(3);
   await demo.close();
 });
 

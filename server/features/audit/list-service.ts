@@ -17,3 +17,11 @@ export function listAudit(
     count,
   });
 }
+
+/** The last entry's number and hash: kept outside the database they show a tail that was cut off. */
+export async function auditHead(db: Database): Promise<{ seq: number; hash: string } | null> {
+  const [head] = await db.select<{ seq: number; hash: string }>(
+    'SELECT seq, hash FROM audit_head WHERE id = 1',
+  );
+  return head ?? null;
+}

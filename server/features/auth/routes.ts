@@ -9,7 +9,7 @@ import type { App } from '../../context.ts';
 import { clearCookies, readCookie, setCookie } from '../../http/cookies.ts';
 import { problem, ProblemError } from '../../http/problems.ts';
 import { defineRoutes, route } from '../../http/route.ts';
-import { demoPeople } from '../people/demo-service.ts';
+import { demoPeopleHere } from '../people/demo-service.ts';
 import { presentMe } from './presenter.ts';
 import { changePassword, signIn } from './service.ts';
 import { endSession, endSessionOf, renewSession, type Tokens } from './session-service.ts';
@@ -84,6 +84,7 @@ export const routes = defineRoutes('auth', [
     summary: 'The invented people of the demo and their password; only in demo mode',
     who: 'public',
     response: demoPeopleResponse,
-    handler: ({ app }) => (app.config.demo ? { people: [...demoPeople] } : problem('not-found')),
+    handler: async ({ app }) =>
+      app.config.demo ? { people: [...(await demoPeopleHere(app))] } : problem('not-found'),
   }),
 ]);

@@ -39,3 +39,10 @@ export async function addDemoPeople(app: App): Promise<number> {
     return demoPeople.length;
   });
 }
+
+/** Those of them who can sign in: a firm that has begun real work may have taken them out. */
+export async function demoPeopleHere(app: App): Promise<typeof demoPeople> {
+  const rows = await app.db.models.Person.findAll({ where: { state: 'active' }, attributes: ['email'] });
+  const here = new Set(rows.map(({ email }) => email));
+  return demoPeople.filter(({ email }) => here.has(email));
+}

@@ -10,7 +10,7 @@ import { appendAudit } from '../audit/service.ts';
 import { refusalOf } from './policy.ts';
 import { presentPerson } from './presenter.ts';
 
-export { addDemoPeople, demoPeople } from './demo-service.ts';
+export { addDemoPeople, demoPeople, demoPeopleHere } from './demo-service.ts';
 
 export const listPeople = (app: App): Promise<PersonRow[]> =>
   app.db.models.Person.findAll({
