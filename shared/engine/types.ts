@@ -269,8 +269,6 @@ export interface DetailKind {
   readonly limitStates: readonly Omit<LimitStateInfo, 'clause'>[];
   /** Every rule that can reject a cell of this kind. The order is the packed code, so it only grows at the end. */
   readonly rules: readonly { readonly id: string; readonly title: string }[];
-  /** Every rule that can reject a cell, in a fixed order. */
-  readonly rules: readonly { readonly id: string; readonly title: string }[];
   readonly notes: readonly string[];
   prepare(
     values: ParameterValues,

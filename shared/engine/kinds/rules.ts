@@ -3,6 +3,9 @@ import type { Rejection } from '../types.ts';
 /** A rule of validity. Which side of the limit is allowed follows from `least`. */
 export interface Rule {
   readonly id: string;
+  /** What is measured, e.g. `Pitch`. */
+  readonly subject: string;
+  /** What is wrong when it is broken, e.g. `Pitch too small`. */
   readonly title: string;
   readonly clause: string;
   readonly unit: string;
@@ -31,7 +34,7 @@ export class Rejections {
   add(rule: Rule, value: number, limit: number, message?: string): void {
     const relation = rule.least ? 'is below the least' : 'exceeds the greatest';
     const unit = rule.unit === '' ? '' : ` ${rule.unit}`;
-    const text = `${rule.title}: ${short(value)}${unit} ${relation} ${short(limit)}${unit}`;
+    const text = `${rule.subject}: ${short(value)}${unit} ${relation} ${short(limit)}${unit}`;
     const { id, title, clause } = rule;
     this.list.push({ rule: id, title, clause, message: message ?? text, value, limit, unit: rule.unit });
   }

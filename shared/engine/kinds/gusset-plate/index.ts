@@ -6,7 +6,6 @@ import { limitStates } from './limits.ts';
 import { buildModel } from './model.ts';
 import { notes } from './notes.ts';
 import { parameters } from './parameters.ts';
-import { ruleLegend } from './rule-titles.ts';
 import { rules } from './rule-list.ts';
 
 /** A plate welded to the face of a support, with a bolted brace that pulls or pushes at an angle. */
@@ -20,7 +19,6 @@ export const gussetPlate: DetailKind = {
   parameters,
   limitStates: limitStates.map(({ id, code, title, part }) => ({ id, code, title, part })),
   rules,
-  rules: ruleLegend,
   notes,
   prepare(values, basisId, catalogue, factors) {
     const checked = validateParameters(parameters, values, catalogue);

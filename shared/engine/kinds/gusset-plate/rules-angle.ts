@@ -1,5 +1,6 @@
 import { keeps, type Rejections, type Rule } from '../rules.ts';
 import type { GussetModel } from './model.ts';
+import { ruleOf } from './rule-list.ts';
 import { END, type GussetView, LOWER, UPPER } from './view.ts';
 
 /** Room for a spanner beside a bolt, by bolt diameter, from its centre to a face or a weld (common practice, from memory). */
@@ -12,25 +13,13 @@ export class AngleRules {
   private readonly leastFace: number;
   private readonly spannerRoom: number;
   private readonly leastClearance: number;
-  private readonly corner = plain(
-    'outline-corner',
-    'Corner of the plate to the face',
-    'geometry of the detail',
-  );
-  private readonly cut = plain(
-    'outline-cut',
-    'Cut end beyond the ends of the weld',
-    'geometry of the detail',
-  );
+  private readonly corner = ruleOf('outline-corner', 'geometry of the detail', 'mm');
+  private readonly cut = ruleOf('outline-cut', 'geometry of the detail', 'mm');
   private readonly edge: Rule;
   private readonly end: Rule;
-  private readonly face = plain('hole-clear-of-weld', 'Hole clear of the weld', 'geometry of the detail');
-  private readonly spanner = plain('spanner-room', 'First row to the face', 'common practice');
-  private readonly clearance = plain(
-    'member-clearance',
-    'Brace to the face of the support',
-    'common practice',
-  );
+  private readonly face = ruleOf('hole-clear-of-weld', 'geometry of the detail', 'mm');
+  private readonly spanner = ruleOf('spanner-room', 'common practice', 'mm');
+  private readonly clearance = ruleOf('member-clearance', 'common practice', 'mm');
 
   constructor(private readonly m: GussetModel) {
     const { detailing } = m.basis;
@@ -41,8 +30,8 @@ export class AngleRules {
     this.leastFace = m.weldLeg + d0 / 2;
     this.spannerRoom = m.weldLeg + SPANNER_ROOM * d;
     this.leastClearance = Math.max(m.values.number('clearance'), m.weldLeg);
-    this.edge = plain('gusset-edge', 'Edge distance on the gusset', detailing.clauses.edge);
-    this.end = plain('gusset-end', 'End distance on the gusset along the force', detailing.clauses.end);
+    this.edge = ruleOf('gusset-edge', detailing.clauses.edge, 'mm');
+    this.end = ruleOf('gusset-end', detailing.clauses.end, 'mm');
   }
 
   /**
@@ -91,8 +80,4 @@ function test(found: Rejections | null, rule: Rule, value: number, limit: number
   if (found === null) return false;
   found.add(rule, value, limit);
   return true;
-}
-
-function plain(id: string, title: string, clause: string): Rule {
-  return { id, title, clause, unit: 'mm', least: true };
 }
