@@ -1,21 +1,6 @@
-import {
-  LIMITS,
-  type AngleGrid,
-  type ParameterSetting,
-  type parameterValueSchema,
-} from '@shared/contracts/definition.ts';
-import type { z } from 'zod';
+import { LIMITS, type AngleGrid, type ParameterSetting } from '@shared/contracts/definition.ts';
+import { countOfRange } from '@shared/engine/sweep/index.ts';
 import { count } from '../../composables/format.ts';
-import { countOfRange, valuesOfRange } from './read-numbers.ts';
-
-type Value = z.output<typeof parameterValueSchema>;
-
-/** Every value that a setting stands for. */
-export function valuesOf(setting: ParameterSetting): readonly Value[] {
-  if (setting.mode === 'fixed') return [setting.value];
-  if (setting.mode === 'list') return setting.values;
-  return valuesOfRange(setting.from, setting.to, setting.step);
-}
 
 const many = (grid: AngleGrid | ParameterSetting): number => {
   if (grid.mode === 'fixed') return 1;

@@ -1,5 +1,6 @@
 import type { ParameterSetting } from '@shared/contracts/definition.ts';
 import { kilonewtons, toRadians } from '@shared/engine/index.ts';
+import { valuesOf } from '@shared/engine/sweep/index.ts';
 import type {
   BasisId,
   CellOutcome,
@@ -13,7 +14,6 @@ import type {
   Sense,
 } from '@shared/engine/types.ts';
 import type { CapacityCurve } from '../load-dial/types.ts';
-import { valuesOf } from './counts.ts';
 
 /** Which value of each swept parameter the sample has; the place in its list. */
 export type Sample = Readonly<Record<string, number>>;
@@ -79,7 +79,3 @@ export function previewOf(
 /** The outcome at one angle, degrees. */
 export const outcomeAt = (detail: PreparedDetail, angle: number, sense: Sense): CellOutcome =>
   detail.outcome(toRadians(angle), sense);
-
-/** Down to the increment, as a published value is, kN. */
-export const roundedDown = (value: number, increment: number): number =>
-  Math.floor(value / increment + 1e-9) * increment;

@@ -1,4 +1,4 @@
-import { LIMITS } from '@shared/contracts/definition.ts';
+import { countOfRange } from '@shared/engine/sweep/index.ts';
 import { numberOf } from '../../composables/number-text.ts';
 import type { RangeText } from './draft.ts';
 
@@ -64,10 +64,6 @@ export function readList(
   return own.length ? null : values.filter((value) => value !== null);
 }
 
-/** How many values a range has; the end counts when a step falls on it, but for the error of sums. */
-export const countOfRange = (from: number, to: number, step: number): number =>
-  Math.floor((to - from) / step + 1e-9) + 1;
-
 export function readRange(
   rule: NumberRule,
   text: RangeText,
@@ -96,9 +92,3 @@ export function readRange(
     });
   return faults.length > before ? null : { from, to, step };
 }
-
-/** The values of a range, free of the error of sums. */
-export const valuesOfRange = (from: number, to: number, step: number): number[] =>
-  Array.from({ length: Math.min(countOfRange(from, to, step), LIMITS.values) }, (_, at) =>
-    Number((from + at * step).toPrecision(12)),
-  );
