@@ -31,13 +31,25 @@ export function itemAt(scrolled: number, viewport: number, size: number, count: 
 }
 
 /** Where an item stands in the scrolled box, px; in a squeezed list it depends on the scroll itself. */
-export function offsetOf(item: number, scrolled: number, viewport: number, size: number, count: number): number {
+export function offsetOf(
+  item: number,
+  scrolled: number,
+  viewport: number,
+  size: number,
+  count: number,
+): number {
   if (lengthOf(count, size) === count * size) return item * size;
   return scrolled + (item - itemAt(scrolled, viewport, size, count)) * size;
 }
 
 /** The scroll that brings an item into view with the least movement, px. */
-export function scrollTo(item: number, scrolled: number, viewport: number, size: number, count: number): number {
+export function scrollTo(
+  item: number,
+  scrolled: number,
+  viewport: number,
+  size: number,
+  count: number,
+): number {
   const length = lengthOf(count, size);
   const at = itemAt(scrolled, viewport, size, count);
   const shown = viewport / size;
