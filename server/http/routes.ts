@@ -1,3 +1,6 @@
+import { routes as sweeps } from '../features/sweeps/routes.ts';
+import { routes as revisions } from '../features/revisions/routes.ts';
+import { routes as families } from '../features/families/routes.ts';
 import { routes as audit } from '../features/audit/routes.ts';
 import { routes as auth } from '../features/auth/routes.ts';
 import { routes as health } from '../features/health/routes.ts';
@@ -13,5 +16,8 @@ export const allRoutes: readonly RouteDeclaration[] = [
   ...people,
   ...settings,
   ...audit,
+  ...sweeps,
+  ...revisions,
+  ...families,
   ...documentationRoutes(() => allRoutes),
 ];

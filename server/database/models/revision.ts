@@ -3,6 +3,21 @@ import type { InferAttributes, InferCreationAttributes, Model } from 'sequelize'
 import type { RevisionState } from '@shared/contracts/common.ts';
 import { id, instant, lockVersion, reference } from './columns.ts';
 
+/** What a finished sweep says of itself; frozen with the cells. */
+export interface ResultSummary {
+  /** Swept parameters, in the order of the grid: the last varies fastest. */
+  readonly axes: readonly { readonly name: string; readonly values: readonly unknown[] }[];
+  /** Degrees. */
+  readonly angles: readonly number[];
+  readonly senses: readonly string[];
+  /** kN */
+  readonly increment: number;
+  /** kN; null when every cell is rejected. */
+  readonly lowest: number | null;
+  readonly highest: number | null;
+  readonly rejected: readonly { readonly rule: string; readonly cells: number }[];
+}
+
 export interface RevisionRow extends Model<
   InferAttributes<RevisionRow>,
   InferCreationAttributes<RevisionRow>
@@ -29,7 +44,7 @@ export interface RevisionRow extends Model<
   publishedAt: CreationOptional<Date | null>;
   lockedAt: CreationOptional<Date | null>;
   withdrawnReason: CreationOptional<string | null>;
-  resultSummary: CreationOptional<unknown>;
+  resultSummary: CreationOptional<ResultSummary | null>;
   lockVersion: CreationOptional<number>;
   createdAt: CreationOptional<Date>;
   updatedAt: CreationOptional<Date>;
