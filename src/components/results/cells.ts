@@ -22,7 +22,11 @@ export interface Cells {
   readonly weldVolume: Float32Array;
 }
 
-export function emptyCells({ variants, senses, angles }: Pick<ResultAxes, 'variants' | 'senses' | 'angles'>): Cells {
+export function emptyCells({
+  variants,
+  senses,
+  angles,
+}: Pick<ResultAxes, 'variants' | 'senses' | 'angles'>): Cells {
   const each = senses.length * angles.length;
   const blockSize = Math.min(VARIANTS_IN_BLOCK, Math.max(1, Math.floor(CELLS_IN_BLOCK / each)));
   return {

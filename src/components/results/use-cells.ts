@@ -33,7 +33,9 @@ export function useCells(revisionId: number, axes: ResultAxes) {
     } finally {
       asked.delete(block);
     }
-    for (const tell of waiting) tell();
+    const told = waiting;
+    waiting = [];
+    for (const tell of told) tell();
     proceed();
   }
 
@@ -58,7 +60,6 @@ export function useCells(revisionId: number, axes: ResultAxes) {
     need(blocks);
     while (!error.value && blocks.some((block) => !cells.loaded[block]))
       await new Promise<void>((resolve) => waiting.push(resolve));
-    waiting = [];
     return !error.value;
   }
 
