@@ -33,7 +33,7 @@ export function readAddress(query: LocationQuery): ResultsAddress {
       picked: Object.fromEntries(pairs),
     },
     cell: cellOf(text(query.cell)),
-    heat: query.heat === 'on',
+    heat: query.heat !== 'off',
   };
 }
 
@@ -45,7 +45,7 @@ export function writeAddress(layout: Layout, cell: CellPlace | null, heat: boole
     across: layout.across,
     sense: layout.sense,
     ...(pick.length ? { pick: pick.join(',') } : {}),
-    ...(heat ? { heat: 'on' } : {}),
+    ...(heat ? {} : { heat: 'off' }),
     ...(cell ? { cell: `${cell.ordinal}.${cell.angle}` } : {}),
   };
 }

@@ -1,9 +1,10 @@
+import { ANGLE_AXIS } from '@shared/contracts/exports.ts';
 import type { ResultAxes } from '@shared/contracts/revisions.ts';
 import { degrees } from '../../composables/format.ts';
 import { valueTitle } from '../../composables/value-title.ts';
 
 /** The load angle's name among the dimensions of a table; no parameter is named so. */
-export const ANGLE = 'load-angle';
+export const ANGLE = ANGLE_AXIS;
 
 /** What a table can be laid out over: a swept parameter, or the load angle. */
 export interface Dimension {

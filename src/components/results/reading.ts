@@ -1,8 +1,7 @@
 import type { ResultAxes } from '@shared/contracts/revisions.ts';
-import { decimalsOf, degrees, fixed } from '../../composables/format.ts';
+import { decimalsOf, degrees, fixed, upTo } from '../../composables/format.ts';
 import { cellIndex, NOT_LOADED, type Cells } from './cells.ts';
-import type { Dimension } from './dimensions.ts';
-import { placesOf } from './dimensions.ts';
+import { placesOf, type Dimension } from './dimensions.ts';
 import type { CellPlace } from './layout.ts';
 
 type LimitState = ResultAxes['limitStates'][number];
@@ -59,3 +58,17 @@ export function variantLines(dimensions: readonly Dimension[], ordinal: number) 
 
 export const angleTitle = (axes: Pick<ResultAxes, 'angles'>, place: number): string =>
   degrees(axes.angles[place] ?? 0);
+
+/** What a variant weighs and takes to make. `mass` in kg, `weldVolume` in mm3. */
+export interface Quantities {
+  readonly mass: number;
+  readonly boltCount: number;
+  readonly weldVolume: number;
+}
+
+/** The quantities as lines, weld metal in cm3. A variant that cannot be made has none. */
+export const quantityLines = ({ mass, boltCount, weldVolume }: Quantities) => [
+  { label: 'Mass of the plate', value: Number.isNaN(mass) ? '—' : `${upTo(mass, 2)} kg` },
+  { label: 'Bolts', value: String(boltCount) },
+  { label: 'Weld volume', value: Number.isNaN(weldVolume) ? '—' : `${upTo(weldVolume / 1000, 1)} cm³` },
+];

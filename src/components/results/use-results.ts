@@ -62,8 +62,8 @@ export function useResults(revision: Revision, axes: ResultAxes) {
 
   const name = `${revision.family.code} ${revisionName(revision.letter).toLowerCase()}`;
   const caption = computed(() => {
-    const rest = table.value.rest.map(
-      ({ name, label, unit, titles }) => `${label} ${titles[picked.value.picked[name] ?? 0]} ${unit}`.trim(),
+    const rest = table.value.rest.map(({ name, label, unit, titles }) =>
+      `${label} ${titles[picked.value.picked[name] ?? 0]} ${unit}`.trim(),
     );
     const hash = revision.shortHash ? [`hash ${revision.shortHash}`] : [];
     return [name, picked.value.sense, ...rest, 'capacities in kN, rounded down', ...hash].join('; ');
@@ -86,5 +86,21 @@ export function useResults(revision: Revision, axes: ResultAxes) {
     notices.say(`${size} ${size === 1 ? 'cell' : 'cells'} copied.`);
   }
 
-  return { dimensions, layout, table, heat, place, selection, cells, filled, error, retry, read, readPlace, choose, copy, caption };
+  return {
+    dimensions,
+    layout,
+    table,
+    heat,
+    place,
+    selection,
+    cells,
+    filled,
+    error,
+    retry,
+    read,
+    readPlace,
+    choose,
+    copy,
+    caption,
+  };
 }
