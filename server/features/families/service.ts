@@ -61,18 +61,18 @@ export async function updateFamily(
   lockVersion: number,
   change: z.output<typeof updateFamilyRequest>,
 ): Promise<FamilyView> {
-  await app.db.transaction(async (transaction) => {
+  const stale = await app.db.transaction(async (transaction) => {
     const family = await heldFamily(app, id, transaction);
-    if (family.lockVersion !== lockVersion) {
-      problem('stale-version', { current: await viewFamily(app, person, id) });
-    }
+    if (family.lockVersion !== lockVersion) return true;
     await refuseTakenCode(app, change.code, id, transaction);
     await refuseRenameOfIssued(app, family, change.code, transaction);
     const before = { code: family.code, title: family.title };
     await family.update(change, { transaction });
     await record(app, person, family, 'family.changed', { before, after: change }, transaction);
+    return false;
   });
-  return viewFamily(app, person, id);
+  const current = await viewFamily(app, person, id);
+  return stale ? problem('stale-version', { current }) : current;
 }
 
 /**
