@@ -83,3 +83,34 @@ describe('a parameter', () => {
     expect(draft.list).toEqual(['70']);
   });
 });
+
+describe('a list of values', () => {
+  const typeOn = async (text: string) => {
+    for (const end of Array.from(text, (_, at) => at + 1)) {
+      const input = labelled('Pitch, values');
+      fieldLabelled('Pitch, values', input.value + text.slice(end - 1, end));
+      await nextTick();
+    }
+  };
+
+  it.each([
+    ['80 85 ', ['70', '80', '85']],
+    ['80; 85; ', ['70', '80', '85']],
+    ['80, 85.5, ', ['70', '80', '85.5']],
+  ])('takes "%s" as it is typed', async (text, expected) => {
+    const draft = await show('pitch');
+    await choose('List');
+    await typeOn(text);
+    expect(draft.list).toEqual(expected);
+    expect(messages()).toEqual([]);
+    expect(sizes()).toContain('3 variants');
+  });
+
+  it('keeps a piece that is not a number, and says so', async () => {
+    const draft = await show('pitch');
+    await choose('List');
+    await typeOn('eighty ');
+    expect(draft.list).toEqual(['70', 'eighty']);
+    expect(messages()).toEqual(['Pitch must be a number from 10 to 500 mm; “eighty” was given.']);
+  });
+});

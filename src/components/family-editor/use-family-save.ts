@@ -25,12 +25,15 @@ export function useFamilySave(form: FamilyForm, start: Stored) {
   const revision = shallowRef(start.revision);
   const conflict = shallowRef<Conflict | null>(null);
   const conflictOpen = ref(false);
+  const written = () => JSON.stringify(form.read.value.definition);
+  /** The definition as it is stored; a change of code or title alone must not throw a sweep away. */
+  let stored = start.revision ? written() : '';
 
   async function saveNames(): Promise<void> {
     const { code, title } = form.draft;
-    const stored = family.value;
-    if (!stored || (stored.code === code && stored.title === title)) return;
-    family.value = await updateFamily(stored.id, stored.lockVersion, { code, title });
+    const own = family.value;
+    if (!own || (own.code === code && own.title === title)) return;
+    family.value = await updateFamily(own.id, own.lockVersion, { code, title });
   }
 
   async function showConflict(id: number): Promise<void> {
@@ -50,7 +53,9 @@ export function useFamilySave(form: FamilyForm, start: Stored) {
       family.value = await createFamily({ code, title, definition });
     } else {
       await saveNames();
-      revision.value = await saveDefinition(revision.value.id, revision.value.lockVersion, definition);
+      if (written() !== stored)
+        revision.value = await saveDefinition(revision.value.id, revision.value.lockVersion, definition);
+      stored = written();
     }
     form.settle();
     return family.value;
@@ -75,6 +80,7 @@ export function useFamilySave(form: FamilyForm, start: Stored) {
     if (!conflict.value) return;
     form.take(merged(structuredClone(toRaw(form.draft)), conflict.value.theirs, fromTheirs));
     revision.value = conflict.value.revision;
+    stored = '';
     conflictOpen.value = false;
     await task.run();
   }
