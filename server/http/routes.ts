@@ -3,6 +3,7 @@ import { routes as revisions } from '../features/revisions/routes.ts';
 import { routes as families } from '../features/families/routes.ts';
 import { routes as audit } from '../features/audit/routes.ts';
 import { routes as auth } from '../features/auth/routes.ts';
+import { routes as catalogue } from '../features/catalogue/routes.ts';
 import { routes as health } from '../features/health/routes.ts';
 import { routes as people } from '../features/people/routes.ts';
 import { routes as settings } from '../features/settings/routes.ts';
@@ -16,6 +17,7 @@ export const allRoutes: readonly RouteDeclaration[] = [
   ...people,
   ...settings,
   ...audit,
+  ...catalogue,
   ...sweeps,
   ...revisions,
   ...families,
