@@ -1,4 +1,5 @@
 import type { Sheet } from '@shared/contracts/revisions.ts';
+import { findKind } from '@shared/engine/index.ts';
 import { fixed, upTo } from '../../composables/format.ts';
 import { valueTitle } from '../../composables/value-title.ts';
 
@@ -31,15 +32,13 @@ export function givenGroups(parameters: Sheet['parameters'], kind: string) {
       title,
       lines: parameters
         .filter(({ group }) => group === id)
-        .map(
-          ({ name, label, symbol, unit, value }): GivenLine => ({
-            name,
-            label,
-            symbol,
-            unit,
-            value: valueTitle(kind, name, value),
-          }),
-        ),
+        .map(({ name, label, symbol, unit, value }): GivenLine => ({
+          name,
+          label,
+          symbol,
+          unit,
+          value: valueTitle(kind, name, value),
+        })),
     }))
     .filter(({ lines }) => lines.length > 0);
 }
@@ -84,9 +83,17 @@ export function summaryOf({ sections, outcome }: Pick<Sheet, 'sections' | 'outco
             title,
             capacity,
             clause: lines.findLast(({ clause }) => clause !== '')?.clause ?? '',
-            governing: outcome.status === 'capacity' && (outcome.governing === id || outcome.governing === code),
+            governing:
+              outcome.status === 'capacity' && (outcome.governing === id || outcome.governing === code),
             ratio: capacity !== null && lowest ? capacity / lowest : null,
           },
         ],
   );
+}
+
+/** The limit states of the sheet with the part that gives way, in the order of the kind, for their colours. */
+export function limitStatesOf({ sections }: Pick<Sheet, 'sections'>, kind: string) {
+  const known = findKind(kind)?.limitStates ?? [];
+  const others = sections.filter(({ id, code }) => code !== null && !known.some((state) => state.id === id));
+  return [...known, ...others.map(({ id }) => ({ id, part: '' }))];
 }
