@@ -20,6 +20,7 @@ export const dashOf = (place: number): readonly number[] => DASHES[place % DASHE
 export interface DrawnCurve {
   readonly angles: readonly number[];
   readonly capacity: readonly (number | null)[];
+  readonly governing: readonly number[];
   readonly limitStates: readonly {
     readonly id: string;
     readonly code: string;
