@@ -52,8 +52,8 @@ export const definitionSchema = z.strictObject({
   parameters: z.record(z.string().max(40), parameterSettingSchema),
   angles: angleGridSchema,
   senses: z.array(senseSchema).min(1).max(2),
-  /** Published values are rounded down to this, kN. */
-  increment: z.number().positive().max(100),
+  /** Published values are rounded down to this, kN. Cells are stored in single precision, which tells 0.1 kN apart. */
+  increment: z.number().min(0.1).max(100),
   factors: z.strictObject({
     gammaM0: z.number().min(0.9).max(2),
     gammaM1: z.number().min(0.9).max(2),

@@ -9,6 +9,8 @@ const password = 'harrow quay drawing office';
 export const demoPeople: readonly { name: string; email: string; role: Role; password: string }[] = [
   { name: 'Thandeka Marais', email: 'standards@harrowquay.example', role: 'standards-manager', password },
   { name: 'Ivo Brandgard', email: 'engineer@harrowquay.example', role: 'engineer', password },
+  { name: 'Oluchi Venter', email: 'checker@harrowquay.example', role: 'engineer', password },
+  { name: 'Marek Solheim', email: 'details@harrowquay.example', role: 'standards-manager', password },
   { name: 'Lena Storhaug', email: 'drafter@harrowquay.example', role: 'drafter', password },
   { name: 'Priya Oduya', email: 'admin@harrowquay.example', role: 'admin', password },
 ];

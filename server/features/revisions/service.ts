@@ -5,3 +5,11 @@ export { isCurrent, isIssued, maySee } from './policy.ts';
 export { peopleOf, presentSummary } from './presenter.ts';
 export { definitionOf, findVisible, visibleRevision } from './read-service.ts';
 export { keepSave } from './save-service.ts';
+export {
+  lockRevision,
+  publishRevision,
+  returnRevision,
+  signRevision,
+  submitRevision,
+  withdrawRevision,
+} from './life-service.ts';
