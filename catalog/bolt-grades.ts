@@ -1,17 +1,22 @@
-import type { BoltGradeRecord, Practice, TensileBand } from './types.ts';
+import type { AiscStressBand, BoltGradeRecord, Practice, TensileBand } from './types.ts';
 
 /** The largest diameter that ISO 898-1 gives property classes for, mm. */
 const LARGEST = 39;
 
 const propertyClass = {
-  source: 'Nominal: EN 1993-1-8 Table 3.1. Minimum: ISO 898-1 Table 3, minimum tensile strength R_m',
-  edition: 'EN 1993-1-8:2005; ISO 898-1:2013',
+  source:
+    'Nominal: EN 1993-1-8 Table 3.1. Minimum: ISO 898-1 Table 3, minimum tensile strength R_m. ' +
+    'AISC: 0.75, 0.450 and 0.563 of the minimum strength, not above Group 120 (8.8) and Group 150 (10.9) of ' +
+    'ANSI/AISC 360 Table J3.2, rounded down to whole MPa',
+  edition: 'EN 1993-1-8:2005; ISO 898-1:2013; ANSI/AISC 360-22',
   evidence: 'from memory; nominal f_ub of 4.6 and 8.8 seen in published resistance tables',
 };
 const assembly = {
-  source: 'ASTM F3125, minimum tensile strength',
-  edition: 'ASTM F3125/F3125M-19',
-  evidence: 'read in published handbook notes',
+  source:
+    'ASTM F3125, minimum tensile and yield strength. AISC: ANSI/AISC 360 Table J3.2, Group 120 (A325M), Group 150 (A490M)',
+  edition: 'ASTM F3125/F3125M-19; ANSI/AISC 360-22',
+  evidence:
+    'tensile strength read in published handbook notes; yield from memory; table in ksi read, its MPa from memory',
 };
 
 /** Class, nominal f_yb, nominal f_ub, minimum by diameter. */
@@ -37,8 +42,24 @@ const rows: readonly Row[] = [
   ['10.9', 900, 1000, upTo(1040)],
 ];
 
+/** Group 120 and Group 150 of AISC 360 Table J3.2, MPa. */
+const group120 = { fnt: 620, fnvN: 372, fnvX: 469 };
+const group150 = { fnt: 780, fnvN: 469, fnvX: 579 };
+const noGroup = { fnt: Infinity, fnvN: Infinity, fnvX: Infinity };
+const groupOf: Readonly<Record<string, Omit<AiscStressBand, 'dMax'>>> = { '8.8': group120, '10.9': group150 };
+
+/** Table J3.2 for a threaded part of tensile strength `fub`, never above the group that the class stands beside. */
+function threadedPart({ dMax, fub }: TensileBand, group: Omit<AiscStressBand, 'dMax'>): AiscStressBand {
+  return {
+    dMax,
+    fnt: Math.floor(Math.min(0.75 * fub, group.fnt)),
+    fnvN: Math.floor(Math.min(0.45 * fub, group.fnvN)),
+    fnvX: Math.floor(Math.min(0.563 * fub, group.fnvX)),
+  };
+}
+
 function fromClass([name, fyb, fub, minimum]: Row): BoltGradeRecord {
-  const practices: readonly Practice[] = ['en', 'sans'];
+  const practices: readonly Practice[] = ['en', 'sans', 'csa', 'aisc'];
   const nominal = { fyb, fub };
   return {
     name,
@@ -47,13 +68,20 @@ function fromClass([name, fyb, fub, minimum]: Row): BoltGradeRecord {
     dMax: LARGEST,
     nominal,
     minimum,
+    fyb,
+    aisc: minimum.map((band) => threadedPart(band, groupOf[name] ?? noGroup)),
     practices,
     ...propertyClass,
     missing: [],
   };
 }
 
-function fromAssembly(name: string, fub: number): BoltGradeRecord {
+function fromAssembly(
+  name: string,
+  fyb: number,
+  fub: number,
+  group: Omit<AiscStressBand, 'dMax'>,
+): BoltGradeRecord {
   return {
     name,
     family: 'structural-assembly',
@@ -61,6 +89,8 @@ function fromAssembly(name: string, fub: number): BoltGradeRecord {
     dMax: 36,
     nominal: null,
     minimum: [{ dMax: 36, fub }],
+    fyb,
+    aisc: [{ dMax: 36, ...group }],
     practices: ['csa', 'aisc'],
     ...assembly,
     missing: [{ field: 'nominal', reason: 'EN 1993-1-8 Table 3.1 does not have this grade' }],
@@ -70,6 +100,6 @@ function fromAssembly(name: string, fub: number): BoltGradeRecord {
 /** ISO property classes and metric ASTM structural bolt grades. MPa. */
 export const boltGrades: readonly BoltGradeRecord[] = [
   ...rows.map(fromClass),
-  fromAssembly('A325M', 830),
-  fromAssembly('A490M', 1040),
+  fromAssembly('A325M', 660, 830, group120),
+  fromAssembly('A490M', 940, 1040, group150),
 ];

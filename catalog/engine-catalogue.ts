@@ -4,14 +4,20 @@ import type { BoltSizeRecord, Catalogue } from './types.ts';
 
 /**
  * The part of the reference data that a kind computes with, in the engine's own shape.
- * A bolt size or grade without the values of EN and SANS is left out: those bases cannot use it.
+ * A bolt size without the holes of EN and SANS is left out. What another standard does not list is null or empty,
+ * and its bases refuse it by name.
  */
 export function toEngineCatalogue(catalogue: Catalogue): EngineCatalogue {
   return deepFreeze({
     boltSizes: catalogue.bolts.flatMap(boltSize),
-    boltGrades: catalogue.boltGrades.flatMap(({ name, nominal, minimum, source }) =>
-      nominal === null ? [] : [{ name, fyb: nominal.fyb, nominal: nominal.fub, minimum, source }],
-    ),
+    boltGrades: catalogue.boltGrades.map(({ name, fyb, nominal, minimum, aisc, source }) => ({
+      name,
+      fyb,
+      nominal: nominal?.fub ?? null,
+      minimum,
+      aisc,
+      source,
+    })),
     steels: catalogue.steels.map(({ name, bands, source }) => ({
       name,
       bands: bands.map(({ tMax, fy, fu }) => ({ tMax, fy, fu })),
@@ -23,13 +29,24 @@ export function toEngineCatalogue(catalogue: Catalogue): EngineCatalogue {
 }
 
 function boltSize({ name, d, As, holes }: BoltSizeRecord): EngineCatalogue['boltSizes'] {
-  const { en, sans } = holes.normal;
-  return en === null || sans === null ? [] : [{ name, d, stressArea: As, hole: { en, sans } }];
+  const { en, sans, csa, aisc } = holes.normal;
+  return en === null || sans === null ? [] : [{ name, d, stressArea: As, hole: { en, sans, csa, aisc } }];
 }
 
 function angleSection(record: Catalogue['angles'][number]): EngineCatalogue['sections'][number] {
-  const { name, a, b, t, r1, A, source } = record;
-  return { shape: 'angle', name, longLeg: a, shortLeg: b, thickness: t, rootRadius: r1, area: A, source };
+  const { name, a, b, t, r1, A, cx, cy, source } = record;
+  return {
+    shape: 'angle',
+    name,
+    longLeg: a,
+    shortLeg: b,
+    thickness: t,
+    rootRadius: r1,
+    area: A,
+    centroidLong: cx,
+    centroidShort: cy,
+    source,
+  };
 }
 
 function flatSection({

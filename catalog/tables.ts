@@ -23,8 +23,10 @@ export const tables: Readonly<Record<TableName, TableDescription>> = {
     title: 'Bolt property classes and grades',
     units: {
       ...{ dMin: 'mm', dMax: 'mm' },
+      fyb: 'MPa',
       ...under('nominal', { fyb: 'MPa', fub: 'MPa' }),
       ...under('minimum', { dMax: 'mm', fub: 'MPa' }),
+      ...under('aisc', { dMax: 'mm', fnt: 'MPa', fnvN: 'MPa', fnvX: 'MPa' }),
     },
   },
   steels: {

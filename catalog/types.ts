@@ -46,6 +46,14 @@ export interface TensileBand {
   readonly fub: number;
 }
 
+/** Tension, shear with threads in the plane (N) and not (X) for bolts up to and including `dMax`, MPa. */
+export interface AiscStressBand {
+  readonly dMax: number;
+  readonly fnt: number;
+  readonly fnvN: number;
+  readonly fnvX: number;
+}
+
 export interface BoltGradeRecord extends CatalogueRecord {
   readonly family: 'property-class' | 'structural-assembly';
   /** Smallest and largest bolt diameter the values hold for, mm. */
@@ -55,6 +63,10 @@ export interface BoltGradeRecord extends CatalogueRecord {
   readonly nominal: { readonly fyb: number; readonly fub: number } | null;
   /** Specified minimum tensile strength, MPa, by diameter: what SANS, CSA and AISC practice reads. */
   readonly minimum: readonly TensileBand[];
+  /** Yield strength of the grade, nominal for a property class and minimum for an assembly, MPa. */
+  readonly fyb: number;
+  /** Nominal stresses as AISC 360 Table J3.2 gives them for this grade, by diameter, MPa. */
+  readonly aisc: readonly AiscStressBand[];
   readonly practices: readonly Practice[];
 }
 

@@ -6,7 +6,8 @@
 /** Which way the resultant acts along the axis of the connected member. */
 export type Sense = 'tension' | 'compression';
 
-export type BasisId = 'sans-10162-1-2011' | 'en-1993-1-8-2005';
+export type BasisId =
+  'sans-10162-1-2011' | 'csa-s16-2019' | 'en-1993-1-8-2005' | 'aisc-360-2022-lrfd' | 'aisc-360-2022-asd';
 export type KindId = 'gusset-plate';
 
 /** Yield and tensile strength of a piece at its own thickness. MPa. */
@@ -28,6 +29,15 @@ export interface BoltGrade {
   readonly name: string;
   readonly fyb: number;
   readonly fub: number;
+  /** Stresses of AISC 360 Table J3.2; absent: in proportion to `fub`. */
+  readonly aisc?: BoltStresses;
+}
+
+/** Nominal stresses of AISC 360 Table J3.2, MPa: tension; shear with threads in the plane (N) and not (X). */
+export interface BoltStresses {
+  readonly fnt: number;
+  readonly fnvN: number;
+  readonly fnvX: number;
 }
 
 /** Ultimate tensile strength X_u of the weld metal, MPa. */
@@ -45,6 +55,9 @@ export interface AngleSection {
   readonly thickness: number;
   readonly rootRadius: number;
   readonly area: number;
+  /** From the back of the long leg to the centroid, and from the back of the short leg; absent: from the legs. */
+  readonly centroidLong?: number;
+  readonly centroidShort?: number;
 }
 export interface FlatSection {
   readonly shape: 'flat';
@@ -233,15 +246,23 @@ export interface PreparedDetail {
 /** The reference data a kind needs; plain data so that it can cross to a worker or a browser. */
 export interface EngineCatalogue {
   readonly boltSizes: readonly (BoltSize & {
-    readonly hole: { readonly en: number; readonly sans: number };
+    /** Normal round holes; null where the standard lists none for this size. */
+    readonly hole: {
+      readonly en: number;
+      readonly sans: number;
+      readonly csa: number | null;
+      readonly aisc: number | null;
+    };
   })[];
   readonly boltGrades: readonly {
     readonly name: string;
     readonly fyb: number;
-    /** Nominal strength, used by EN; MPa. */
-    readonly nominal: number;
-    /** ISO 898-1 minimum tensile strength by size, used by SANS practice: first band whose dMax is not below d. */
+    /** Nominal strength, used by EN; MPa; null for a grade that EN does not have. */
+    readonly nominal: number | null;
+    /** Minimum tensile strength by size, used by SANS and CSA: first band whose dMax is not below d. */
     readonly minimum: readonly { readonly dMax: number; readonly fub: number }[];
+    /** Stresses of AISC 360 Table J3.2 by size, read as `minimum`. */
+    readonly aisc: readonly (BoltStresses & { readonly dMax: number })[];
     readonly source: string;
   }[];
   readonly steels: readonly {

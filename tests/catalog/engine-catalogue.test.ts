@@ -6,12 +6,12 @@ const engine = toEngineCatalogue(catalogue);
 it('hands the engine every size, class and section with the values of its own basis', () => {
   expect(engine.boltSizes).toHaveLength(catalogue.bolts.length);
   expect(engine.sections).toHaveLength(catalogue.angles.length + catalogue.flats.length);
-  // EN 1090-2 d + 2 at M24, d + 3 at M27; ISO 898-1 stress areas.
+  // EN 1090-2 d + 2 at M24, CSA S16 22.3.5 d + 2, ANSI/AISC 360 Table J3.3M 27; ISO 898-1 stress areas.
   expect(engine.boltSizes.find(({ name }) => name === 'M24')).toEqual({
     name: 'M24',
     d: 24,
     stressArea: 353,
-    hole: { en: 26, sans: 26 },
+    hole: { en: 26, sans: 26, csa: 26, aisc: 27 },
   });
   // EN 10056-1, from memory: L150x75x10 has r1 12 and 21.7 cm2.
   expect(engine.sections.find(({ name }) => name === 'L150x75x10')).toMatchObject({
@@ -21,6 +21,9 @@ it('hands the engine every size, class and section with the values of its own ba
     thickness: 10,
     rootRadius: 12,
     area: 2170,
+    // The same table: e_x 5.31 cm along the long leg, e_y 1.61 cm along the short leg.
+    centroidLong: 16.1,
+    centroidShort: 53.1,
   });
   expect(engine.sections.find(({ name }) => name === 'FL120x12')).toMatchObject({
     shape: 'flat',
@@ -37,9 +40,19 @@ it('keeps the nominal and the minimum bolt strength apart', () => {
   expect(grade?.minimum.map(({ fub }) => fub)).toEqual([800, 830]);
 });
 
-it('leaves out the grades that EN gives no nominal strength', () => {
-  const names = engine.boltGrades.map(({ name }) => name);
+it('has no nominal strength for the grades that EN does not have', () => {
+  const names = engine.boltGrades.filter(({ nominal }) => nominal !== null).map(({ name }) => name);
   expect(names).toEqual(['4.6', '4.8', '5.6', '5.8', '6.8', '8.8', '10.9']);
+  expect(engine.boltGrades.slice(7).map(({ name }) => name)).toEqual(['A325M', 'A490M']);
+});
+
+it('gives a class the lower of Table J3.2 of AISC 360 for its group and for a threaded part', () => {
+  // Group 120: 90, 54, 68 ksi. Threaded part of 830 MPa: 622.5, 373.5, 467.3; of 800 MPa: 600, 360, 450.4.
+  const grade = engine.boltGrades.find(({ name }) => name === '8.8');
+  expect(grade?.aisc).toEqual([
+    { dMax: 16, fnt: 600, fnvN: 360, fnvX: 450 },
+    { dMax: 39, fnt: 620, fnvN: 372, fnvX: 467 },
+  ]);
 });
 
 it('names a source for every record and is frozen', () => {

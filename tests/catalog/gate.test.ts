@@ -42,7 +42,7 @@ const KNOWN_FILES = [
 const PLAUSIBLE: Readonly<Record<string, readonly [number, number]>> = {
   mm: [1, 1200],
   mm2: [50, 50_000],
-  MPa: [200, 1100],
+  MPa: [180, 1100],
   'kg/m': [0.5, 400],
 };
 

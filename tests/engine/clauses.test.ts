@@ -18,11 +18,15 @@ const standards = new URL('../../shared/engine/standards/', import.meta.url);
 describe('clauses', () => {
   it('every exported clause function cites its clause or table', () => {
     const uncited: string[] = [];
-    for (const folder of ['en-1993-1-8-2005', 'sans-10162-1-2011']) {
+    for (const folder of ['en-1993-1-8-2005', 'sans-10162-1-2011', 'csa-s16-2019', 'aisc-360-2022']) {
       for (const file of readdirSync(new URL(folder, standards))) {
         const text = readFileSync(new URL(`${folder}/${file}`, standards), 'utf8');
         for (const match of text.matchAll(/(\/\*\*(?:(?!\*\/)[\s\S])*\*\/\s*)?export function (\w+)/g)) {
-          if (!/(EN 199|EN 1090|SANS 10162|welding practice|5 to 12 mm)/.test(match[1] ?? ''))
+          if (
+            !/(EN 199|EN 1090|SANS 10162|CSA S16:19|CSA W59|ANSI\/AISC 360-22|welding practice|5 to 12 mm)/.test(
+              match[1] ?? '',
+            )
+          )
             uncited.push(`${file}: ${match[2]}`);
         }
       }
@@ -96,7 +100,16 @@ describe('clauses', () => {
 describe('the public door', () => {
   it('finds kinds and bases by name, and nothing by another', () => {
     expect(kinds.map(({ id }) => id)).toEqual(['gusset-plate']);
-    expect(bases.map(({ id }) => id)).toEqual(['sans-10162-1-2011', 'en-1993-1-8-2005']);
+    expect(bases.map(({ id, resultLabel }) => [id, resultLabel])).toEqual([
+      ['sans-10162-1-2011', 'factored resistance'],
+      ['csa-s16-2019', 'factored resistance'],
+      ['en-1993-1-8-2005', 'design resistance'],
+      ['aisc-360-2022-lrfd', 'design strength'],
+      ['aisc-360-2022-asd', 'allowable strength'],
+    ]);
+    for (const { title, short, notes } of bases) {
+      expect(title.length > short.length && short.length > 5 && notes.length > 5).toBe(true);
+    }
     expect(findKind('constructor')).toBeUndefined();
     expect(findBasis('constructor')).toBeUndefined();
     expect(findBasis('en-1993-1-8-2005')?.notes.length).toBeGreaterThan(5);

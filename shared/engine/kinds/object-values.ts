@@ -9,7 +9,7 @@ import type {
 } from '../types.ts';
 
 /** One number of a value given by its numbers instead of by a catalogue name. */
-interface NumberField {
+export interface NumberField {
   readonly name: string;
   readonly minimum: number;
   readonly maximum: number;
@@ -24,7 +24,7 @@ const field = (name: string, minimum: number, maximum: number, optional = false)
 });
 
 /** The forms that a value by numbers can take; the section's is chosen by its shape. mm, mm2, MPa. */
-const forms = {
+export const forms = {
   steel: [field('fy', 100, 1000), field('fu', 150, 1500)],
   boltSize: [field('d', 5, 100), field('stressArea', 5, 8000)],
   boltGrade: [field('fyb', 100, 1500), field('fub', 200, 2000)],
@@ -35,6 +35,8 @@ const forms = {
     field('thickness', 2, 80),
     field('rootRadius', 0, 60, true),
     field('area', 20, 100_000, true),
+    field('centroidLong', 1, 500, true),
+    field('centroidShort', 1, 500, true),
   ],
   flat: [field('width', 10, 2000), field('thickness', 2, 200), field('area', 20, 400_000, true)],
 } as const satisfies Record<string, readonly NumberField[]>;
@@ -123,6 +125,10 @@ function checkAngle(numbers: Numbers): ObjectRead {
   const computed = (longLeg + shortLeg - thickness) * thickness + (CORNER * rootRadius * rootRadius) / 2;
   const { area = computed } = numbers;
   if (area > (longLeg + shortLeg) * thickness * 1.1) return { fault: 'area exceeds what the legs can hold' };
+  const { centroidLong, centroidShort } = numbers;
+  if ((centroidLong ?? 0) >= shortLeg || (centroidShort ?? 0) >= longLeg) {
+    return { fault: 'centroidLong must lie within the short leg and centroidShort within the long leg' };
+  }
   const value: Omit<AngleSection, 'name'> = {
     shape: 'angle',
     longLeg,
@@ -130,6 +136,8 @@ function checkAngle(numbers: Numbers): ObjectRead {
     thickness,
     rootRadius,
     area,
+    ...(centroidLong === undefined ? {} : { centroidLong }),
+    ...(centroidShort === undefined ? {} : { centroidShort }),
   };
   return { value };
 }

@@ -104,7 +104,8 @@ function recordWeakest(
   rec.line('R_b,min', 'weakest bolt along the force', '', strength, 'N', method);
 }
 
-function inclinedBolt(
+/** Strength of one bolt along the force by the same method, N; bolts are numbered row by row, line by line. */
+export function inclinedBolt(
   ply: BearingStrength,
   group: InclinedGroup,
   bolt: number,

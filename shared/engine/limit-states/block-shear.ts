@@ -1,4 +1,4 @@
-import type { Basis, Rec } from '../standards/basis.ts';
+import type { Basis, BlockPull, Rec } from '../standards/basis.ts';
 
 /**
  * A ply that a block can leave: thickness and hole as deducted, mm; strengths, MPa. In `kept` the blocks are
@@ -30,17 +30,52 @@ export function blockCapacity(
   side2: number,
   rec: Rec,
 ): number {
+  const tornOut = 2 * ply.lines * Math.min(shear1, shear2) * ply.thickness;
+  const least = leastBlock(basis, ply, shear1, shear2, side1, side2, rec);
+  return Math.min(least, basis.tearOut(tornOut, ply.fy, ply.fu, rec));
+}
+
+/** The lowest of the blocks that keep a tension plane, N. */
+function leastBlock(
+  basis: Basis,
+  ply: BlockPly,
+  shear1: number,
+  shear2: number,
+  side1: number,
+  side2: number,
+  rec: Rec,
+): number {
   const { gauge, angle } = ply;
   if (ply.lines === 1) {
-    const second = block(basis, ply, 'one shear plane, to the upper edge', 1, shear1, side2, 0.5, true, rec);
+    const second = block(
+      basis,
+      ply,
+      'one shear plane, to the upper edge',
+      1,
+      shear1,
+      side2,
+      0.5,
+      'uneven',
+      rec,
+    );
     if (angle) return second;
     return Math.min(
       second,
-      block(basis, ply, 'one shear plane, to the lower edge', 1, shear1, side1, 0.5, true, rec),
+      block(basis, ply, 'one shear plane, to the lower edge', 1, shear1, side1, 0.5, 'uneven', rec),
     );
   }
   const both = shear1 + shear2;
-  let least = block(basis, ply, 'two shear planes, tension between the lines', 2, both, gauge, 1, angle, rec);
+  let least = block(
+    basis,
+    ply,
+    'two shear planes, tension between the lines',
+    2,
+    both,
+    gauge,
+    1,
+    angle ? 'uneven' : 'even',
+    rec,
+  );
   const across = block(
     basis,
     ply,
@@ -49,7 +84,7 @@ export function blockCapacity(
     shear1,
     gauge + side2,
     1.5,
-    true,
+    'uneven',
     rec,
   );
   least = Math.min(least, across);
@@ -62,7 +97,7 @@ export function blockCapacity(
     shear2,
     gauge + side1,
     1.5,
-    true,
+    'uneven',
     rec,
   );
   const strips = block(
@@ -73,7 +108,7 @@ export function blockCapacity(
     both,
     side1 + side2,
     1,
-    false,
+    'even',
     rec,
   );
   return Math.min(least, back, strips);
@@ -87,7 +122,7 @@ function block(
   shear: number,
   tension: number,
   tensionHoles: number,
-  eccentric: boolean,
+  pull: BlockPull,
   rec: Rec,
 ): number {
   const { thickness, deduction, rows } = ply;
@@ -95,7 +130,7 @@ function block(
   const agv = thickness * shear;
   const anv = thickness * Math.max(0, shear - planes * (rows - 0.5) * deduction);
   if (rec !== null) recordBlock(basis, name, ant, agv, anv, rec);
-  return basis.blockShear(ant, agv, anv, ply.fy, ply.fu, eccentric, rec);
+  return basis.blockShear(ant, agv, anv, ply.fy, ply.fu, pull, rec);
 }
 
 function recordBlock(

@@ -17,6 +17,12 @@ export type CatalogueBoltSize = EngineCatalogue['boltSizes'][number];
 export type HoleMaking = 'punched' | 'drilled';
 export type EdgeFinish = 'sheared' | 'rolled';
 
+/**
+ * How a block is pulled on its tension plane: evenly over it; unevenly, as by one line of bolts at its side or by
+ * one leg of an angle; at the coped end of a beam by one or by two lines of bolts.
+ */
+export type BlockPull = 'even' | 'uneven' | 'coped-one-line' | 'coped-two-lines';
+
 /** The checks that a limit state can ask of a basis; each basis names its clause. */
 export type ClauseKey =
   | 'filletMetal'
@@ -51,6 +57,10 @@ export interface BearingPly {
   readonly fu: number;
   /** A single lap joint with one row of bolts across the force. */
   readonly singleLapOneRow: boolean;
+  /** Shear strength of one bolt, all planes, N: some bases let no bolt take more than that. */
+  readonly boltShear: number;
+  /** Whether the lengthening of the hole under service load matters. */
+  readonly deformationMatters: boolean;
 }
 
 /** Bearing and tear-out of one bolt on one ply. */
@@ -62,12 +72,23 @@ export interface BearingStrength {
   bolt(end: number, pitch: number, edge: number, gauge: number, rec: Rec): number;
 }
 
-/** One fillet. */
+/** A part that a fillet is laid on. */
+export interface FilletPart extends Steel {
+  readonly thickness: number;
+  /** Fillets of the line that load this thickness: two where one lies on each side of a plate. */
+  readonly fillets: number;
+}
+
+/** One fillet of a straight line of welds. */
 export interface FilletSpec {
   readonly leg: number;
   readonly xu: number;
-  readonly parts: readonly Steel[];
+  readonly parts: readonly FilletPart[];
   readonly directional: boolean;
+  /** The resultant passes through the middle of the line. */
+  readonly concentric: boolean;
+  /** The electrode matches the parts, which some bases take to settle the base metal. */
+  readonly matching: boolean;
 }
 
 /** Strength of one fillet under a force per millimetre: `pull` across its axis, `shear` along it, N/mm. */
@@ -85,6 +106,8 @@ export interface AngleByOneLeg {
   readonly thickness: number;
   readonly connectedLeg: number;
   readonly otherLeg: number;
+  /** From the back of the connected leg to the centroid. */
+  readonly centroid: number;
   readonly rows: number;
   /** Bolts across the force in the connected leg. */
   readonly lines: number;
@@ -112,8 +135,8 @@ export interface Detailing {
   leastEdge(d: number, d0: number, finish: EdgeFinish): number;
   leastEnd(d: number, d0: number, finish: EdgeFinish, boltsInLine: number): number;
   greatestEdge(t: number, exposed: boolean): number;
-  /** By the thicker part joined, mm. */
-  leastWeldLeg(thicker: number): number;
+  /** By the thicker or the thinner part joined, mm. */
+  leastWeldLeg(thicker: number, thinner: number): number;
   leastWeldThroat(): number;
   leastWeldLength(leg: number): number;
   greatestHole(d: number): number;
@@ -126,9 +149,14 @@ export interface Basis {
   readonly clauses: Readonly<Record<ClauseKey, string>>;
   readonly detailing: Detailing;
   readonly modulus: number;
-  normalHole(size: BoltSize, catalogued: CatalogueBoltSize | null): number;
+  /** The strength of a bolt group is the sum of what each bolt takes in shear and on both plies. */
+  readonly boltByBolt: boolean;
+  /** Diameter of the normal round hole, mm, or null when the basis has none for a catalogued size. */
+  normalHole(size: BoltSize, catalogued: CatalogueBoltSize | null): number | null;
   /** Added to a hole's diameter when an area is reduced for it, mm. */
   holeAllowance(making: HoleMaking): number;
+  /** Whether the basis has strengths for a catalogued grade at any diameter. */
+  hasGrade(grade: CatalogueGrade): boolean;
   /** The strengths of a catalogued grade at a bolt diameter, or null when the grade has none there. */
   grade(grade: CatalogueGrade, d: number): BoltGrade | null;
   boltShear(bolt: BoltInShear, rec: Rec): number;
@@ -138,16 +166,21 @@ export interface Basis {
   fillet(spec: FilletSpec): FilletStrength;
   /** Design yield stress of a plate section, MPa. */
   yieldStress(fy: number): number;
-  /** Areas mm2, strengths MPa; `eccentric`: the tension on the block is not uniform. */
+  /** Areas mm2, strengths MPa. */
   blockShear(
     ant: number,
     agv: number,
     anv: number,
     fy: number,
     fu: number,
-    eccentric: boolean,
+    pull: BlockPull,
     rec: Rec,
   ): number;
+  /**
+   * All bolts torn out along two gross planes each line, mm2, MPa; Infinity where the basis sees to it with the
+   * bearing of each bolt.
+   */
+  tearOut(agv: number, fy: number, fu: number, rec: Rec): number;
   tensionYield(area: number, fy: number, rec: Rec): number;
   tensionRupture(net: number, fu: number, rec: Rec): number;
   /** Flexural buckling of a plate strip; `slenderness` is K L / r. */

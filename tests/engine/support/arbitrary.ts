@@ -30,14 +30,15 @@ const likely: Readonly<Record<string, readonly [number, number]>> = {
   buckling_k: [0.5, 2],
 };
 
+/** Names that every basis has values for. */
 function names(type: ParameterSpec['type']): string[] {
   switch (type) {
     case 'steel':
       return catalogue.steels.map(({ name }) => name);
     case 'boltSize':
-      return catalogue.boltSizes.map(({ name }) => name);
+      return catalogue.boltSizes.filter(({ hole }) => hole.aisc !== null).map(({ name }) => name);
     case 'boltGrade':
-      return catalogue.boltGrades.map(({ name }) => name);
+      return catalogue.boltGrades.filter(({ nominal }) => nominal !== null).map(({ name }) => name);
     case 'electrode':
       return catalogue.electrodes.map(({ name }) => name);
     default:

@@ -135,7 +135,9 @@ export class GussetDetail implements PreparedDetail {
     out[2] = limits.plateSection(model, view, null);
     out[3] = this.boltShear;
     out[4] = limits.gussetBearing(model, view, oneBolt, null);
-    out[5] = tension ? this.memberBearing.tension : this.memberBearing.compression;
+    out[5] = model.basis.boltByBolt
+      ? limits.sharedBearing(model, view, null)
+      : this.memberBearing[tension ? 'tension' : 'compression'];
     out[6] = limits.gussetBlock(model, view, null);
     out[7] = tension ? this.memberBlock : Infinity;
     out[8] = limits.whitmore(model, view, null);
@@ -154,7 +156,10 @@ export class GussetDetail implements PreparedDetail {
       (r) => limits.plateSection(model, view, r),
       (r) => limits.boltShear(model, r),
       (r) => limits.gussetBearing(model, view, oneBolt, r),
-      (r) => limits.memberBearing(model, tension, oneBolt, r),
+      (r) =>
+        model.basis.boltByBolt
+          ? limits.sharedBearing(model, view, r)
+          : limits.memberBearing(model, tension, oneBolt, r),
       (r) => limits.gussetBlock(model, view, r),
       (r) => limits.memberBlock(model, tension, r),
       (r) => limits.whitmore(model, view, r),

@@ -1,5 +1,6 @@
 import { createBasis } from '../../standards/registry.ts';
 import type { DetailKind } from '../../types.ts';
+import { basisFaults } from '../basis-faults.ts';
 import { validateFactors, validateParameters } from '../validate.ts';
 import { GussetDetail } from './detail.ts';
 import { limitStates } from './limits.ts';
@@ -31,6 +32,7 @@ export const gussetPlate: DetailKind = {
         message: 'There is no such design basis',
       });
     }
+    if (checked.ok && basis !== undefined) faults.push(...basisFaults(checked.values, basis));
     if (!checked.ok || basis === undefined || faults.length > 0) return { ok: false, faults };
     return { ok: true, detail: new GussetDetail(buildModel(checked.values, basis)) };
   },

@@ -1,4 +1,4 @@
-import { alignedBearing, inclinedBearing } from '../../limit-states/bearing.ts';
+import { alignedBearing, inclinedBearing, inclinedBolt } from '../../limit-states/bearing.ts';
 import { blockCapacity } from '../../limit-states/block-shear.ts';
 import { plateSectionCapacity } from '../../limit-states/plate-section.ts';
 import { weldLineCapacity } from '../../limit-states/weld-line.ts';
@@ -116,6 +116,50 @@ export function memberBearing(m: GussetModel, tension: boolean, oneBolt: number,
   return alignedBearing(m.basis, m.memberBearing, m.rows, m.lines, end, m.pitch, edge, gauge, oneBolt, rec);
 }
 
+/**
+ * Bearing on the brace where each bolt counts for what it takes in shear and on both plies, N: the sum of the lesser
+ * of gusset and brace over the bolts. In tension the first row has the end of the brace ahead, the last that of the
+ * gusset.
+ */
+export function sharedBearing(m: GussetModel, v: GussetView, rec: Rec): number {
+  const { member, rows, lines, pitch } = m;
+  const ofMember = member.linesEach === 2 ? m.gauge : Infinity;
+  const end = v.tension ? member.endDistance : Infinity;
+  if (rec !== null) rec.line('', 'row ahead', '', '', '', '');
+  const ahead = m.memberBearing.bolt(end, Infinity, member.toeDistance, ofMember, rec);
+  if (rec !== null && rows > 1) rec.line('', 'rows behind', '', '', '', '');
+  const behind = m.memberBearing.bolt(Infinity, pitch, member.toeDistance, ofMember, rows > 1 ? rec : null);
+  let sum = 0;
+  for (let row = 0; row < rows; row++) {
+    const onMember = row === (v.tension ? 0 : rows - 1) ? ahead : behind;
+    for (let line = 0; line < lines; line++) sum += Math.min(onMember, gussetBolt(m, v, row, line));
+  }
+  if (rec !== null) {
+    const meaning = 'each bolt, the lesser on brace and gusset';
+    rec.line('Σ', meaning, '', sum, 'N', m.basis.clauses.bearing);
+  }
+  return sum;
+}
+
+/** What one bolt takes on the gusset, N. */
+function gussetBolt(m: GussetModel, v: GussetView, row: number, line: number): number {
+  if (!m.tapered) {
+    return inclinedBolt(
+      m.plateBearing,
+      m.inclined,
+      row * m.lines + line,
+      v.cos,
+      v.sin,
+      v.tension ? 1 : -1,
+      null,
+    );
+  }
+  const gauge = m.lines === 2 ? m.gauge : Infinity;
+  const isAhead = row === (v.tension ? m.rows - 1 : 0);
+  const end = v.tension && isAhead ? m.cutDistance - m.lastRow : Infinity;
+  return m.plateBearing.bolt(end, isAhead ? Infinity : m.pitch, edgeBeside(m, v), gauge, null);
+}
+
 /** A block of the gusset torn outwards, N: tension only. */
 export function gussetBlock(m: GussetModel, v: GussetView, rec: Rec): number {
   if (!v.tension) return Infinity;
@@ -177,6 +221,7 @@ export function memberNet(m: GussetModel, tension: boolean, rec: Rec): number {
       thickness,
       connectedLeg: member.connectedLeg,
       otherLeg: member.otherLeg,
+      centroid: member.centroid,
       rows: m.rows,
       lines: linesEach,
       pitch: m.pitch,

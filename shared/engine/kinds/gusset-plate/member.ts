@@ -48,6 +48,8 @@ export interface GussetMember {
   readonly linesEach: number;
   readonly connectedLeg: number;
   readonly otherLeg: number;
+  /** From the back of the connected leg to the centroid; 0 for a flat. */
+  readonly centroid: number;
   readonly thickness: number;
   readonly rootRadius: number;
   /** Heel to the first line; for a flat, edge to the first line. */
@@ -105,11 +107,18 @@ export function memberOf(values: Resolved, deduction: number, noSteel: Steel): G
 
 function legsOf(section: Section, connected: string) {
   if (section.shape === 'flat')
-    return { connectedLeg: section.width, otherLeg: section.width, rootRadius: 0 };
-  const { longLeg, shortLeg, rootRadius } = section;
+    return { connectedLeg: section.width, otherLeg: section.width, rootRadius: 0, centroid: 0 };
+  const { longLeg, shortLeg, thickness, rootRadius, centroidLong, centroidShort } = section;
+  const long = centroidLong ?? centroidOf(longLeg, shortLeg, thickness);
+  const short = centroidShort ?? centroidOf(shortLeg, longLeg, thickness);
   return connected === 'long'
-    ? { connectedLeg: longLeg, otherLeg: shortLeg, rootRadius }
-    : { connectedLeg: shortLeg, otherLeg: longLeg, rootRadius };
+    ? { connectedLeg: longLeg, otherLeg: shortLeg, rootRadius, centroid: long }
+    : { connectedLeg: shortLeg, otherLeg: longLeg, rootRadius, centroid: short };
+}
+
+/** From the back of one leg to the centroid of both as rectangles, which lies a little far out (errs low), mm. */
+function centroidOf(leg: number, other: number, t: number): number {
+  return (leg * t + other * other - t * t) / (2 * (leg + other - t));
 }
 
 function backmarkOf(section: Section, leg: number, lines: number, gauge: number, given: number): number {

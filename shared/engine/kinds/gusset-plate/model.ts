@@ -6,11 +6,13 @@ import type {
   BearingStrength,
   BoltInShear,
   EdgeFinish,
+  FilletPart,
   FilletStrength,
   HoleMaking,
 } from '../../standards/basis.ts';
 import type { BoltGrade, Electrode, Steel } from '../../types.ts';
 import { type Resolved, steelAt } from '../resolved.ts';
+import { TOLERANCE } from '../rules.ts';
 import { memberOf, type GussetMember } from './member.ts';
 
 /** Stands for a strength that the catalogue does not have; the rule that says so rejects the detail. */
@@ -74,8 +76,10 @@ export function buildModel(values: Resolved, basis: Basis): GussetModel {
   const fillet = basis.fillet({
     leg: values.number('weld_leg'),
     xu: values.electrode('electrode').xu,
-    parts: [plate.plate, plate.support],
+    parts: weldedParts(plate),
     directional: values.choice('weld_method') === 'directional',
+    concentric: Math.abs(values.number('work_line_offset')) <= TOLERANCE,
+    matching: values.choice('electrode_match') === 'matching',
   });
   const weldLength = values.number('weld_length');
   const deducted = values.choice('weld_ends') === 'deducted';
@@ -85,7 +89,9 @@ export function buildModel(values: Resolved, basis: Basis): GussetModel {
   const { rows, lines, gauge } = layout;
   const lap = {
     ...bolt,
-    normalHole: normalHole(values, basis),
+    normalHole: normalHole(values, basis) ?? bolt.holeDiameter,
+    boltShear: basis.boltShear(bolt, null),
+    deformationMatters: values.choice('hole_deformation') === 'limited',
     singleLapOneRow: bolt.planes === 1 && rows === 1,
   };
   const projection = values.number('projection');
@@ -135,6 +141,15 @@ function plateOf(values: Resolved) {
   return { thickness, plate, support, supportThickness };
 }
 
+/** The plate between its two fillets, and the support under each. */
+function weldedParts(plate: ReturnType<typeof plateOf>): readonly FilletPart[] {
+  const { thickness, supportThickness } = plate;
+  return [
+    { ...plate.plate, thickness, fillets: 2 },
+    { ...plate.support, thickness: supportThickness === 0 ? thickness : supportThickness, fillets: 1 },
+  ];
+}
+
 function layoutOf(values: Resolved) {
   const rows = values.number('rows');
   const lines = values.number('lines');
@@ -153,7 +168,7 @@ function layoutOf(values: Resolved) {
   };
 }
 
-function normalHole(values: Resolved, basis: Basis): number {
+function normalHole(values: Resolved, basis: Basis): number | null {
   const { size, catalogued } = values.size('bolt_size');
   return basis.normalHole(size, catalogued);
 }
@@ -166,7 +181,8 @@ function boltOf(values: Resolved, basis: Basis, jointLength: number): BoltInShea
   return {
     size,
     grade: grade ?? noGrade,
-    holeDiameter: hole === 0 ? normalHole(values, basis) : hole,
+    // A size without a hole of its own is a fault unless the hole is given.
+    holeDiameter: hole === 0 ? (normalHole(values, basis) ?? size.d) : hole,
     planes: values.choice('brace') === 'back_to_back' ? 2 : 1,
     threadsInPlane: values.choice('threads') === 'in_plane',
     jointLength,

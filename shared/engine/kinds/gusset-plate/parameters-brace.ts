@@ -52,6 +52,21 @@ export const boltParameters: readonly ParameterSpec[] = [
     help: 'Diameter of the round holes. 0: the normal round hole of the basis.',
   },
   {
+    name: 'hole_deformation',
+    label: 'Deformation at the holes',
+    symbol: '',
+    group: 'method',
+    type: 'choice',
+    unit: '',
+    choices: [
+      { value: 'limited', label: 'Limited', help: '2.4 d t F_u and 1.2 l_c t F_u.' },
+      { value: 'accepted', label: 'Accepted', help: '3.0 d t F_u and 1.5 l_c t F_u.' },
+    ],
+    default: 'limited',
+    bases: ['aisc-360-2022-lrfd', 'aisc-360-2022-asd'],
+    help: 'Whether holes that lengthen under service load are a design consideration.',
+  },
+  {
     name: 'rows',
     label: 'Rows of bolts',
     symbol: 'n',

@@ -125,7 +125,7 @@ const plateParameters: readonly ParameterSpec[] = [
       { value: 'rolled', label: 'Rolled, sawn or gas cut', help: 'The smaller edge distances.' },
     ],
     default: 'sheared',
-    bases: ['sans-10162-1-2011'],
+    bases: ['sans-10162-1-2011', 'csa-s16-2019'],
     help: 'How the edges of the gusset and the end of the brace are made.',
   },
   {
@@ -140,7 +140,7 @@ const plateParameters: readonly ParameterSpec[] = [
       { value: 'drilled', label: 'Drilled', help: 'The hole itself is deducted.' },
     ],
     default: 'punched',
-    bases: ['sans-10162-1-2011'],
+    bases: ['sans-10162-1-2011', 'csa-s16-2019'],
     help: 'How holes are made in the gusset and the brace.',
   },
 ];
@@ -178,8 +178,23 @@ const weldParameters: readonly ParameterSpec[] = [
     type: 'electrode',
     unit: '',
     default: 'E70XX',
-    bases: ['sans-10162-1-2011'],
+    bases: ['sans-10162-1-2011', 'csa-s16-2019', 'aisc-360-2022-lrfd', 'aisc-360-2022-asd'],
     help: 'By catalogue name, or { xu } in MPa.',
+  },
+  {
+    name: 'electrode_match',
+    label: 'Base metal at the weld',
+    symbol: '',
+    group: 'weld',
+    type: 'choice',
+    unit: '',
+    choices: [
+      { value: 'over_matched', label: 'Checked', help: 'As for an electrode stronger than the parts.' },
+      { value: 'matching', label: 'Matching electrode', help: 'The weld metal alone is checked.' },
+    ],
+    default: 'over_matched',
+    bases: ['csa-s16-2019'],
+    help: 'CSA S16 asks for the base metal with over-matched electrodes only.',
   },
   {
     name: 'work_line_offset',
@@ -205,7 +220,7 @@ const weldParameters: readonly ParameterSpec[] = [
       {
         value: 'deducted',
         label: 'Run-out deducted',
-        help: 'EN: one throat at each end; SANS: one leg at each end.',
+        help: 'EN: one throat at each end; the others: one leg at each end.',
       },
     ],
     default: 'full',

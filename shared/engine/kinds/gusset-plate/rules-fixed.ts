@@ -37,7 +37,7 @@ function checkStrengths(m: GussetModel, found: Rejections): void {
   if (m.missing.grade) {
     const { d } = m.bolt.size;
     const message = `Bolt grade: it has no strength at a diameter of ${d} mm`;
-    found.add(ruleOf('bolt-grade-size', 'ISO 898-1', 'mm', false), d, 0, message);
+    found.add(ruleOf('bolt-grade-size', 'product standard of the bolt', 'mm', false), d, 0, message);
   }
 }
 
@@ -116,8 +116,9 @@ function checkGussetEdges(m: GussetModel, found: Rejections): void {
 function checkWeld(m: GussetModel, found: Rejections): void {
   const { detailing } = m.basis;
   const { weldSize, weldLength } = detailing.clauses;
-  const thicker = Math.max(m.thickness, m.supportThickness);
-  found.check(ruleOf('weld-leg-least', weldSize, 'mm'), m.weldLeg, detailing.leastWeldLeg(thicker));
+  const support = m.supportThickness === 0 ? m.thickness : m.supportThickness;
+  const leg = detailing.leastWeldLeg(Math.max(m.thickness, support), Math.min(m.thickness, support));
+  found.check(ruleOf('weld-leg-least', weldSize, 'mm'), m.weldLeg, leg);
   const throat = m.weldLeg / Math.SQRT2;
   found.check(ruleOf('weld-throat-least', weldSize, 'mm'), throat, detailing.leastWeldThroat());
   const least = detailing.leastWeldLength(m.weldLeg);

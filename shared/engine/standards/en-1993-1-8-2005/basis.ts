@@ -5,6 +5,7 @@ import type {
   BasisDefinition,
   BearingPly,
   BearingStrength,
+  BlockPull,
   BoltInShear,
   CatalogueBoltSize,
   CatalogueGrade,
@@ -41,6 +42,7 @@ class EnBasis implements Basis {
   readonly clauses = clauses;
   readonly detailing = detailing;
   readonly modulus = E;
+  readonly boltByBolt = false;
 
   constructor(readonly factors: PartialFactors) {}
 
@@ -52,8 +54,12 @@ class EnBasis implements Basis {
     return 0;
   }
 
-  grade(grade: CatalogueGrade): BoltGrade {
-    return { name: grade.name, fyb: grade.fyb, fub: grade.nominal };
+  hasGrade(grade: CatalogueGrade): boolean {
+    return grade.nominal !== null;
+  }
+
+  grade(grade: CatalogueGrade): BoltGrade | null {
+    return grade.nominal === null ? null : { name: grade.name, fyb: grade.fyb, fub: grade.nominal };
   }
 
   boltShear(bolt: BoltInShear, rec: Rec): number {
@@ -105,9 +111,10 @@ class EnBasis implements Basis {
     anv: number,
     fy: number,
     fu: number,
-    eccentric: boolean,
+    pull: BlockPull,
     rec: Rec,
   ): number {
+    const eccentric = pull !== 'even';
     const strength = blockTearing(ant, anv, fy, fu, eccentric, this.factors.gammaM0, this.factors.gammaM2);
     if (rec !== null) {
       const formula = `${eccentric ? '0.5 ' : ''}f_u A_nt/γ_M2 + f_y A_nv/(√3 γ_M0)`;
@@ -115,6 +122,10 @@ class EnBasis implements Basis {
       rec.line(symbol, 'block', formula, strength, 'N', clauses.blockShear);
     }
     return strength;
+  }
+
+  tearOut(): number {
+    return Infinity;
   }
 
   tensionYield(area: number, fy: number, rec: Rec): number {

@@ -5,6 +5,7 @@ import type {
   BasisDefinition,
   BearingPly,
   BearingStrength,
+  BlockPull,
   BoltInShear,
   CatalogueBoltSize,
   CatalogueGrade,
@@ -43,6 +44,7 @@ class SansBasis implements Basis {
   readonly clauses = clauses;
   readonly detailing = detailing;
   readonly modulus = E;
+  readonly boltByBolt = false;
 
   constructor(readonly factors: PartialFactors) {}
 
@@ -52,6 +54,10 @@ class SansBasis implements Basis {
 
   holeAllowance(making: HoleMaking): number {
     return making === 'punched' ? 2 : 0;
+  }
+
+  hasGrade(): boolean {
+    return true;
   }
 
   grade(grade: CatalogueGrade, d: number): BoltGrade | null {
@@ -110,15 +116,20 @@ class SansBasis implements Basis {
     anv: number,
     fy: number,
     fu: number,
-    _eccentric: boolean,
+    pull: BlockPull,
     rec: Rec,
   ): number {
-    const strength = blockTearing(ant, agv, anv, fy, fu);
+    const coped = pull === 'coped-one-line' || pull === 'coped-two-lines';
+    const strength = blockTearing(ant, agv, anv, fy, fu, coped ? 0.5 : 1);
     if (rec !== null) {
-      const formula = 'φ A_nt f_u + 0.60 φ min(A_gv f_y, A_nv f_u), φ = 0.90';
+      const formula = `${coped ? '0.5 ' : ''}φ A_nt f_u + 0.60 φ min(A_gv f_y, A_nv f_u), φ = 0.90`;
       rec.line('T_r + V_r', 'block', formula, strength, 'N', clauses.blockShear);
     }
     return strength;
+  }
+
+  tearOut(): number {
+    return Infinity;
   }
 
   tensionYield(area: number, fy: number, rec: Rec): number {

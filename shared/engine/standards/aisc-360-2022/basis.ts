@@ -1,0 +1,210 @@
+import type { BoltGrade, BoltSize, PartialFactors } from '../../types.ts';
+import type {
+  AngleByOneLeg,
+  Basis,
+  BasisDefinition,
+  BearingPly,
+  BearingStrength,
+  BlockPull,
+  BoltInShear,
+  CatalogueBoltSize,
+  CatalogueGrade,
+  ClauseKey,
+  FilletSpec,
+  FilletStrength,
+  Rec,
+} from '../basis.ts';
+import { AiscBearing } from './bearing.ts';
+import { nominalBlockShear, uniformity } from './block-shear.ts';
+import { longJointFactor, nominalBoltShear, stressesOf } from './bolt-shear.ts';
+import { criticalStress, E, nominalTensileRupture, nominalTensileYield } from './connected-elements.ts';
+import { detailing, standardClearance } from './detailing.ts';
+import { AiscFillet } from './fillet-line.ts';
+import { asd, available, type Format, lrfd, rupture, yielding } from './format.ts';
+import { infoOf } from './notes.ts';
+import { shearLagFactor } from './shear-lag.ts';
+
+const clauses: Readonly<Record<ClauseKey, string>> = {
+  filletMetal: 'AISC 360 J2.4(a)',
+  filletBaseMetal: 'AISC 360 J2.4, J4',
+  plateSection: 'AISC 360 J4.1(a), elastic section',
+  boltShear: 'AISC 360 J3.7',
+  bearing: 'AISC 360 J3.11a',
+  blockShear: 'AISC 360 J4.3',
+  tensionSection: 'AISC 360 J4.1',
+  compression: 'AISC 360 J4.4, E3',
+  memberNet: 'AISC 360 D2(b), D3',
+  memberGross: 'AISC 360 D2(a)',
+};
+
+/** ANSI/AISC 360-22 in one of its formats. Its factors are part of the standard, so a firm's are not used. */
+class AiscBasis implements Basis {
+  readonly info;
+  readonly clauses = clauses;
+  readonly detailing = detailing;
+  readonly modulus = E;
+  readonly boltByBolt = true;
+
+  constructor(
+    private readonly format: Format,
+    readonly factors: PartialFactors,
+  ) {
+    this.info = infoOf(format);
+  }
+
+  normalHole(size: BoltSize, catalogued: CatalogueBoltSize | null): number | null {
+    return catalogued === null ? size.d + standardClearance(size.d) : catalogued.hole.aisc;
+  }
+
+  holeAllowance(): number {
+    return 2;
+  }
+
+  hasGrade(grade: CatalogueGrade): boolean {
+    return grade.aisc.length > 0;
+  }
+
+  grade(grade: CatalogueGrade, d: number): BoltGrade | null {
+    const band = grade.aisc.find(({ dMax }) => d <= dMax);
+    const tensile = grade.minimum.find(({ dMax }) => d <= dMax);
+    if (band === undefined || tensile === undefined) return null;
+    const { fnt, fnvN, fnvX } = band;
+    return { name: grade.name, fyb: grade.fyb, fub: tensile.fub, aisc: { fnt, fnvN, fnvX } };
+  }
+
+  boltShear(bolt: BoltInShear, rec: Rec): number {
+    const { size, planes, threadsInPlane, jointLength } = bolt;
+    const Ab = (Math.PI * size.d * size.d) / 4;
+    const { fnvN, fnvX } = stressesOf(bolt.grade);
+    const factor = longJointFactor(jointLength);
+    const Fnv = factor * (threadsInPlane ? fnvN : fnvX);
+    const strength = available(this.format, nominalBoltShear({ Fnv, Ab, planes }), rupture);
+    if (rec !== null) {
+      const clause = clauses.boltShear;
+      const threads = threadsInPlane ? 'threads in the planes (N)' : 'threads out of the planes (X)';
+      rec.line('A_b', 'nominal unthreaded area', 'π d²/4', Ab, 'mm²', clause);
+      rec.line('k_L', 'long joint', '0.833 beyond 965 mm', factor, '', 'AISC 360 Table J3.2');
+      rec.line('F_nv', `shear stress, ${threads}`, '', Fnv, 'MPa', 'AISC 360 Table J3.2');
+      rec.line('n_s', 'shear planes', '', planes, '', clause);
+      const formula = `F_nv A_b n_s ${this.format.text(rupture)}`;
+      rec.line('r_v', 'shear of one bolt', formula, strength, 'N', clause);
+    }
+    return strength;
+  }
+
+  bearing(ply: BearingPly): BearingStrength {
+    return new AiscBearing(ply, this.format);
+  }
+
+  bearingGroup(
+    _count: number,
+    _least: number,
+    _most: number,
+    sum: number,
+    _boltShear: number,
+    rec: Rec,
+  ): number {
+    if (rec !== null) rec.line('Σ r', 'sum over the bolts', '', sum, 'N', 'AISC 360 J3.7');
+    return sum;
+  }
+
+  fillet(spec: FilletSpec): FilletStrength {
+    return new AiscFillet(spec, this.format);
+  }
+
+  yieldStress(fy: number): number {
+    return available(this.format, fy, yielding);
+  }
+
+  blockShear(
+    Ant: number,
+    Agv: number,
+    Anv: number,
+    Fy: number,
+    Fu: number,
+    pull: BlockPull,
+    rec: Rec,
+  ): number {
+    const Ubs = uniformity[pull];
+    const strength = available(this.format, nominalBlockShear({ Ant, Agv, Anv, Fy, Fu, Ubs }), rupture);
+    if (rec !== null) {
+      rec.line('U_bs', 'uniformity of the tension', '', Ubs, '', clauses.blockShear);
+      const formula = `(0.60 min(F_u A_nv, F_y A_gv) + U_bs F_u A_nt) ${this.format.text(rupture)}`;
+      rec.line('R', 'block', formula, strength, 'N', clauses.blockShear);
+    }
+    return strength;
+  }
+
+  tearOut(): number {
+    return Infinity;
+  }
+
+  tensionYield(area: number, fy: number, rec: Rec): number {
+    const strength = available(this.format, nominalTensileYield(fy, area), yielding);
+    if (rec !== null) {
+      rec.line(
+        'R_y',
+        'yield',
+        `F_y A_g ${this.format.text(yielding)}`,
+        strength,
+        'N',
+        'AISC 360 J4.1(a), D2(a)',
+      );
+    }
+    return strength;
+  }
+
+  tensionRupture(net: number, fu: number, rec: Rec): number {
+    const strength = available(this.format, nominalTensileRupture(fu, net), rupture);
+    if (rec !== null) {
+      rec.line(
+        'R_u',
+        'rupture',
+        `F_u A_e ${this.format.text(rupture)}`,
+        strength,
+        'N',
+        'AISC 360 J4.1(b), D2(b)',
+      );
+    }
+    return strength;
+  }
+
+  compression(area: number, fy: number, Lcr: number, rec: Rec): number {
+    const Fcr = criticalStress(fy, Lcr);
+    const strength = available(this.format, Fcr * area, yielding);
+    if (rec !== null) {
+      const clause = clauses.compression;
+      const formula = 'F_y to L_c/r = 25; 0.658^(F_y/F_e) F_y; 0.877 F_e for F_y/F_e > 2.25';
+      rec.line('F_cr', 'critical stress', formula, Fcr, 'MPa', clause);
+      rec.line('P', 'buckling', `F_cr A ${this.format.text(yielding)}`, strength, 'N', clause);
+    }
+    return strength;
+  }
+
+  angleNetSection(a: AngleByOneLeg, rec: Rec): number {
+    const An = Math.max(0, a.area - a.lines * a.deduction * a.thickness);
+    const length = (a.rows - 1) * a.pitch;
+    const share = (a.connectedLeg * a.thickness) / a.area;
+    const U = shearLagFactor(a.centroid, length, share);
+    if (rec !== null) {
+      const clause = 'AISC 360 D3, Table D3.1';
+      rec.line('A_n', 'net area of one angle', 'A − holes', An, 'mm²', 'AISC 360 B4.3b');
+      rec.line('x', 'back of the connected leg to the centroid', '', a.centroid, 'mm', clause);
+      rec.line('l', 'between the end rows', '', length, 'mm', clause);
+      rec.line('U', 'shear lag', '1 − x/l, not below b t/A_g of the connected leg', U, '', clause);
+    }
+    return this.tensionRupture(U * An, a.fu, rec);
+  }
+}
+
+/** ANSI/AISC 360-22, load and resistance factor design. */
+export const aisc360Lrfd: BasisDefinition = {
+  info: infoOf(lrfd),
+  create: (factors) => new AiscBasis(lrfd, factors),
+};
+
+/** ANSI/AISC 360-22, allowable strength design. */
+export const aisc360Asd: BasisDefinition = {
+  info: infoOf(asd),
+  create: (factors) => new AiscBasis(asd, factors),
+};

@@ -1,0 +1,57 @@
+import type { Detailing, EdgeFinish } from '../basis.ts';
+
+/** Bolt diameter, least edge distance at a sheared edge, at a rolled, sawn or gas-cut edge. mm. */
+const table6: readonly (readonly [d: number, sheared: number, rolled: number])[] = [
+  [16, 28, 22],
+  [20, 34, 26],
+  [22, 38, 28],
+  [24, 42, 30],
+  [27, 48, 34],
+  [30, 52, 38],
+  [36, 64, 46],
+];
+
+/**
+ * Least edge distance, mm: the row of CSA S16:19 Table 6 for this size or the next larger one; beyond M36 1.75 d
+ * sheared, 1.25 d rolled. Below M16 the M16 row is taken in proportion: 1.75 d and 1.375 d.
+ */
+export function leastEdgeDistance(d: number, finish: EdgeFinish): number {
+  if (d < 16) return (finish === 'sheared' ? 1.75 : 1.375) * d;
+  const row = table6.find(([size]) => size >= d);
+  if (row === undefined) return (finish === 'sheared' ? 1.75 : 1.25) * d;
+  return finish === 'sheared' ? row[1] : row[2];
+}
+
+/** Least fillet leg by the thicker part joined, mm: 5 to 12 mm, 6 to 20 mm, 8 above. CSA W59 (from memory). */
+export function leastFilletLeg(thicker: number): number {
+  if (thicker <= 12) return 5;
+  return thicker <= 20 ? 6 : 8;
+}
+
+/** Greatest hole, mm: 2 mm over the bolt, 27 mm for M24. CSA S16:19, 22.3.5. */
+export function greatestHole(d: number): number {
+  return d === 24 ? 27 : d + 2;
+}
+
+/** Spacing, edges, holes and weld sizes. CSA S16:19, clause 22.3 and Table 6; CSA W59. */
+export const detailing: Detailing = {
+  clauses: {
+    pitch: 'CSA S16 22.3.1',
+    edge: 'CSA S16 22.3.2, Table 6, and 22.3.3',
+    end: 'CSA S16 22.3.4',
+    weldSize: 'CSA W59, with CSA S16 13.13',
+    weldLength: 'CSA S16 13.13, CSA W59',
+    hole: 'CSA S16 22.3.5',
+  },
+  leastPitch: (d) => 2.7 * d,
+  leastGauge: (d) => 2.7 * d,
+  greatestPitch: () => Infinity,
+  leastEdge: (d, _d0, finish) => leastEdgeDistance(d, finish),
+  leastEnd: (d, _d0, finish, boltsInLine) =>
+    Math.max(leastEdgeDistance(d, finish), boltsInLine <= 2 ? 1.5 * d : 0),
+  greatestEdge: (t) => Math.min(12 * t, 150),
+  leastWeldLeg: leastFilletLeg,
+  leastWeldThroat: () => 0,
+  leastWeldLength: (leg) => Math.max(40, 4 * leg),
+  greatestHole,
+};
