@@ -1,5 +1,6 @@
 /** The engine's public door: nothing else of this folder is imported from outside it, the sweep apart. */
 export { findKind, kinds } from './kinds/registry.ts';
+export { forms as numberForms, type NumberField } from './kinds/object-values.ts';
 export { kilonewtons, toDegrees, toRadians } from './numeric/units.ts';
 export { bases, findBasis } from './standards/registry.ts';
 export * from './types.ts';
