@@ -6,6 +6,7 @@ import { routes as auth } from '../features/auth/routes.ts';
 import { routes as catalogue } from '../features/catalogue/routes.ts';
 import { routes as health } from '../features/health/routes.ts';
 import { routes as people } from '../features/people/routes.ts';
+import { routes as results } from '../features/results/routes.ts';
 import { routes as settings } from '../features/settings/routes.ts';
 import { documentationRoutes } from './documentation.ts';
 import type { RouteDeclaration } from './route.ts';
@@ -18,6 +19,7 @@ export const allRoutes: readonly RouteDeclaration[] = [
   ...settings,
   ...audit,
   ...catalogue,
+  ...results,
   ...sweeps,
   ...revisions,
   ...families,

@@ -11,6 +11,11 @@ const catalogueResponse = z.object({
   sections: records,
 });
 
+/** A record as it stands, whatever else than a name its kind has. */
+const whole = (record: { readonly name: string }): Record<string, unknown> & { name: string } => ({
+  ...record,
+});
+
 export const routes = defineRoutes('catalogue', [
   route({
     method: 'get',
@@ -23,11 +28,11 @@ export const routes = defineRoutes('catalogue', [
       etag(engineCatalogueHash());
       const { boltSizes, boltGrades, steels, electrodes, sections } = engineCatalogue();
       return {
-        boltSizes: [...boltSizes],
-        boltGrades: [...boltGrades],
-        steels: [...steels],
-        electrodes: [...electrodes],
-        sections: [...sections],
+        boltSizes: boltSizes.map(whole),
+        boltGrades: boltGrades.map(whole),
+        steels: steels.map(whole),
+        electrodes: electrodes.map(whole),
+        sections: sections.map(whole),
       };
     },
   }),
