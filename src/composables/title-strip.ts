@@ -3,6 +3,10 @@ import { STATE_WORDS } from '../components/common/words.ts';
 import { basisShort } from './basis.ts';
 import type { StripCell } from '../components/common/TitleStrip.vue';
 
+/** "revision B", or "working revision", inside a sentence. */
+export const revisionWords = (letter: string | null): string =>
+  letter ? `revision ${letter}` : 'working revision';
+
 /** The title strip of a revision: what it is, by what basis, who answers for it, and its hash. */
 export function revisionStrip(
   revision: Pick<

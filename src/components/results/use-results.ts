@@ -2,9 +2,10 @@ import type { ResultAxes, Revision } from '@shared/contracts/revisions.ts';
 import { computed, ref, watch, type Ref } from 'vue';
 import { useRoute, useRouter } from 'vue-router';
 import { useNoticesStore } from '../../stores/notices.ts';
-import { revisionName } from '../common/words.ts';
+import { revisionWords } from '../../composables/title-strip.ts';
 import { readAddress, writeAddress } from './address.ts';
 import { blockOf } from './cells.ts';
+import { copyText } from './copy-text.ts';
 import { dimensionsOf } from './dimensions.ts';
 import { fittingLayout, tableOf, usualLayout, type CellPlace, type Layout } from './layout.ts';
 import { cellText, readCell } from './reading.ts';
@@ -60,7 +61,7 @@ export function useResults(revision: Revision, axes: ResultAxes) {
     place.value = table.value.placeOf(row, column);
   }
 
-  const name = `${revision.family.code} ${revisionName(revision.letter).toLowerCase()}`;
+  const name = `${revision.family.code} ${revisionWords(revision.letter)}`;
   const caption = computed(() => {
     const rest = table.value.rest.map(({ name, label, unit, titles }) =>
       `${label} ${titles[picked.value.picked[name] ?? 0]} ${unit}`.trim(),
@@ -82,7 +83,7 @@ export function useResults(revision: Revision, axes: ResultAxes) {
     if (!(await whenLoaded([...blocks]))) return;
     const textOf = (row: number, column: number) =>
       cellText(readPlace(table.value.placeOf(row, column)), axes.increment);
-    await navigator.clipboard.writeText(tsvOf(table.value, bounds, caption.value, textOf));
+    await copyText(tsvOf(table.value, bounds, caption.value, textOf));
     notices.say(`${size} ${size === 1 ? 'cell' : 'cells'} copied.`);
   }
 

@@ -97,3 +97,18 @@ export function limitStatesOf({ sections }: Pick<Sheet, 'sections'>, kind: strin
   const others = sections.filter(({ id, code }) => code !== null && !known.some((state) => state.id === id));
   return [...known, ...others.map(({ id }) => ({ id, part: '' }))];
 }
+
+/** The sections of the working, without the lines that only repeat a given parameter. */
+export function workingSections({ sections, parameters }: Pick<Sheet, 'sections' | 'parameters'>) {
+  const given = new Set(parameters.map(({ label }) => label));
+  return sections
+    .map((section) =>
+      section.code === null
+        ? {
+            ...section,
+            lines: section.lines.filter(({ meaning, formula }) => formula || !given.has(meaning)),
+          }
+        : section,
+    )
+    .filter(({ code, lines }) => code !== null || lines.length > 0);
+}
