@@ -5,6 +5,7 @@ import { routes as audit } from '../features/audit/routes.ts';
 import { routes as auth } from '../features/auth/routes.ts';
 import { routes as catalogue } from '../features/catalogue/routes.ts';
 import { routes as health } from '../features/health/routes.ts';
+import { routes as lookup } from '../features/lookup/routes.ts';
 import { routes as people } from '../features/people/routes.ts';
 import { routes as results } from '../features/results/routes.ts';
 import { routes as settings } from '../features/settings/routes.ts';
@@ -20,6 +21,7 @@ export const allRoutes: readonly RouteDeclaration[] = [
   ...audit,
   ...catalogue,
   ...results,
+  ...lookup,
   ...sweeps,
   ...revisions,
   ...families,
