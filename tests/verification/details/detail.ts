@@ -1,0 +1,38 @@
+import {
+  type BasisId,
+  type EngineCatalogue,
+  findKind,
+  kilonewtons,
+  type ParameterValues,
+  type PreparedDetail,
+  type Sense,
+  toRadians,
+} from '@shared/engine/index.ts';
+
+/** Everything is given by its numbers, so that no record of the catalogue takes part. */
+const nothing: EngineCatalogue = { boltSizes: [], boltGrades: [], steels: [], electrodes: [], sections: [] };
+
+/** One whole detail at one load angle. */
+export interface WholeDetail {
+  readonly basis: BasisId;
+  readonly values: ParameterValues;
+  /** Degrees. */
+  readonly angle: number;
+  readonly sense: Sense;
+}
+
+function prepare({ basis, values }: WholeDetail): PreparedDetail {
+  const prepared = findKind('gusset-plate')?.prepare({ electrode: { xu: 480 }, ...values }, basis, nothing);
+  if (prepared === undefined || !prepared.ok) throw new Error(JSON.stringify(prepared?.faults));
+  return prepared.detail;
+}
+
+/** Capacity of one limit state by its code, or of the whole detail for `R`, kN. */
+export function capacityOf(whole: WholeDetail, code: string): number {
+  const detail = prepare(whole);
+  const out = new Float64Array(detail.limitStates.length);
+  const governing = detail.at(toRadians(whole.angle), whole.sense, out);
+  if (governing < 0) throw new Error(JSON.stringify(detail.outcome(toRadians(whole.angle), whole.sense)));
+  const index = code === 'R' ? governing : detail.limitStates.findIndex((state) => state.code === code);
+  return kilonewtons(out[index] ?? NaN);
+}

@@ -1,0 +1,19 @@
+import type { Check } from './check.ts';
+import { gussetPlates } from './details/gusset-plate.ts';
+import { enBearingTables } from './en/bearing-tables.ts';
+import { enBolts } from './en/bolts.ts';
+import { enWelds } from './en/welds.ts';
+import { enWorkedExamples } from './en/worked-examples.ts';
+import { sansRuleEvaluations } from './sans/rule-evaluations.ts';
+import { sansSameExpression } from './sans/same-expression.ts';
+
+/** Every comparison of the engine with a value from outside it. */
+export const checks: readonly Check[] = [
+  ...enBolts,
+  ...enBearingTables,
+  ...enWorkedExamples,
+  ...enWelds,
+  ...sansSameExpression,
+  ...sansRuleEvaluations,
+  ...gussetPlates,
+];
