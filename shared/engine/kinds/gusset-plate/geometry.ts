@@ -83,9 +83,12 @@ function memberOf(
   }
 }
 
+/** Dimension lines along the brace stand this far beside it, mm of drawing. */
+const BESIDE = 28;
+
 function dimensionsOf(m: GussetModel, place: (s: number, q: number) => Point): DetailGeometry['dimensions'] {
   const { halfHeight, halfGauge, firstRow, lastRow } = m;
-  const side = -(halfGauge + m.member.halfWidth);
+  const side = -(m.member.halfWidth + BESIDE);
   const along = (from: number, to: number, text: string, offset: number) => ({
     from: place(from, -halfGauge),
     to: place(to, -halfGauge),
