@@ -9,7 +9,13 @@ export {
   nominalTensileRupture,
   nominalTensileYield,
 } from './connected-elements.ts';
-export { leastEdgeDistance, leastFilletLeg, leastSpacing, standardClearance } from './detailing.ts';
+export {
+  detailing,
+  leastEdgeDistance,
+  leastFilletLeg,
+  leastSpacing,
+  standardClearance,
+} from './detailing.ts';
 export {
   directionalIncrease,
   endLoadedFactor,

@@ -1,0 +1,6 @@
+import type { Check, Disagreement } from '../check.ts';
+import { courseNoteDisagreements, courseNotes } from './course-notes.ts';
+
+/** CSA S16:19 against published values. */
+export const csaChecks: readonly Check[] = courseNotes;
+export const csaDisagreements: readonly Disagreement[] = courseNoteDisagreements;
