@@ -47,7 +47,7 @@ describe('the life of a revision', () => {
     });
     const here = document.querySelector('[aria-current="step"]');
     expect(here?.textContent).toContain('Published');
-    expect(document.querySelector('ol')?.textContent).toContain('Oluchi Venter, 27 Nov 2026');
+    expect(document.querySelector('ol')?.textContent).toMatch(/Checked, done\s*Oluchi Venter\s*27 Nov 2026/);
   });
 });
 
