@@ -1,7 +1,5 @@
-/** What XML 1.0 cannot hold. */
-// eslint-disable-next-line no-control-regex
-const UNPRINTABLE =
-  /[\u0000-\u0008\u000B\u000C\u000E-\u001F\uFFFE\uFFFF]|[\uD800-\uDBFF](?![\uDC00-\uDFFF])|(?<![\uD800-\uDBFF])[\uDC00-\uDFFF]/g;
+/** What XML 1.0 cannot hold: control characters, halves of surrogate pairs, non-characters. */
+const UNPRINTABLE = /(?![\t\n\r])[\p{Cc}\p{Cs}\uFFFE\uFFFF]/gu;
 const LONGEST = 32_000;
 
 /** Text as a cell takes it. It is written as a string cell, so that `=`, `+`, `-` or `@` in front mean nothing. */

@@ -2,9 +2,7 @@ import type { LookupAnswer } from '@shared/contracts/lookup.ts';
 import { kilonewtons, toRadians, type PreparedDetail, type Sense } from '@shared/engine/index.ts';
 import { capacityCurve, roundDown, ruleLegend } from '@shared/engine/sweep/index.ts';
 import { problem } from '../../http/problems.ts';
-import { limitStatesOf } from '../results/axes-service.ts';
-import { anglesOfKind, type Envelope } from '../results/curve-service.ts';
-import type { SweptRevision } from '../results/swept-revision.ts';
+import { anglesOfKind, type Envelope, limitStatesOf, type SweptRevision } from '../results/service.ts';
 import { readLoad } from './load.ts';
 
 /** What is looked up of one variant. */

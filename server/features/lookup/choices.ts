@@ -2,9 +2,7 @@ import type { Fault } from '@shared/contracts/common.ts';
 import type { ParameterValue } from '@shared/engine/index.ts';
 import { ordinalOf } from '@shared/engine/sweep/index.ts';
 import { problem } from '../../http/problems.ts';
-import { nameParameter } from '../results/axes-service.ts';
-import type { SweptRevision } from '../results/swept-revision.ts';
-import { sameValue, valueText } from './values.ts';
+import { nameParameter, sameValue, type SweptRevision, valueText } from '../results/service.ts';
 
 type Choices = Readonly<Record<string, ParameterValue>>;
 

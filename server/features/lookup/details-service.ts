@@ -3,9 +3,7 @@ import type { lookupDetailsResponse } from '@shared/contracts/lookup.ts';
 import type { App } from '../../context.ts';
 import type { FamilyRow } from '../../database/models/family.ts';
 import type { RevisionRow } from '../../database/models/revision.ts';
-import { nameParameter } from '../results/axes-service.ts';
-import { withResults } from '../results/swept-revision.ts';
-import { fixedParametersOf } from './fixed-parameters.ts';
+import { fixedParametersOf, nameParameter, withResults } from '../results/service.ts';
 
 type Details = z.input<typeof lookupDetailsResponse>['details'];
 

@@ -5,15 +5,16 @@ import type { App } from '../../context.ts';
 import { problem } from '../../http/problems.ts';
 import type { SignedInPerson } from '../../http/route.ts';
 import { isCurrent } from '../revisions/service.ts';
-import { limitStatesOf } from '../results/axes-service.ts';
-import { storedCurve } from '../results/curve-service.ts';
-import { cautionsOf, notesOf } from '../results/sheet-service.ts';
 import {
+  cautionsOf,
+  limitStatesOf,
+  notesOf,
   placeOfSense,
   prepareVariant,
-  sweptRevision,
+  storedCurve,
   type SweptRevision,
-} from '../results/swept-revision.ts';
+  sweptRevision,
+} from '../results/service.ts';
 import { computedAnswer, faultyAnswer, placeOfAngle, storedAnswer } from './answers.ts';
 import type { Answer, Question } from './answers.ts';
 import { ordinalOfChoices } from './choices.ts';

@@ -1,5 +1,5 @@
 import type { ParameterValue } from '@shared/engine/index.ts';
-import type { SweptRevision } from '../results/swept-revision.ts';
+import type { SweptRevision } from './swept-revision.ts';
 
 /** A parameter that is the same in every variant. */
 export interface FixedParameter {
