@@ -43,7 +43,7 @@ export interface Line {
 }
 
 /**
- * The lines of the chart, the envelope last so that it lies on top.
+ * The lines of the chart, the envelope last for a chart draws its last line first: beneath the others.
  */
 export function linesOf(
   curve: DrawnCurve,
@@ -59,10 +59,10 @@ export function linesOf(
       name: code,
       colour: colours.get(id)?.fill ?? ink,
       dash: dashOf(curve.limitStates.findIndex((one) => one.id === id)),
-      width: 1.5,
+      width: 2,
       points: at(capacity),
     }));
-  return [...states, { name: 'Capacity', colour: ink, dash: [], width: 4, points: at(curve.capacity) }];
+  return [...states, { name: 'Capacity', colour: ink, dash: [], width: 5, points: at(curve.capacity) }];
 }
 
 /** The top of the chart, kN: room above the envelope's peak, with the limit states near it. */

@@ -11,6 +11,8 @@ export function useViewport(table: Ref<Table>, headingWidth: Ref<number>) {
   const left = ref(0);
   const height = ref(0);
   const width = ref(0);
+  /** True where the heading columns would fill half of a narrow screen; they then scroll with the rest. */
+  const loose = computed(() => headingWidth.value > width.value);
   let observer: ResizeObserver | undefined;
 
   function measure(): void {
@@ -28,7 +30,11 @@ export function useViewport(table: Ref<Table>, headingWidth: Ref<number>) {
   onBeforeUnmount(() => observer?.disconnect());
 
   const rows = computed(() => windowOf(top.value, height.value, ROW, table.value.rows, 6));
-  const columns = computed(() => windowOf(left.value, width.value, COLUMN, table.value.columns, 3));
+  const columns = computed(() => {
+    const away = loose.value ? headingWidth.value : 0;
+    const from = Math.max(0, left.value - away);
+    return windowOf(from, width.value + away, COLUMN, table.value.columns, 3);
+  });
   const firstRow = computed(() => rows.value.first);
   const endRow = computed(() => rows.value.end);
   const firstColumn = computed(() => columns.value.first);
@@ -41,5 +47,5 @@ export function useViewport(table: Ref<Table>, headingWidth: Ref<number>) {
     box.value.scrollLeft = scrollTo(column, box.value.scrollLeft, width.value, COLUMN, table.value.columns);
     measure();
   }
-  return { box, top, height, firstRow, endRow, firstColumn, endColumn, page, measure, reveal };
+  return { box, top, height, firstRow, endRow, firstColumn, endColumn, page, loose, measure, reveal };
 }
