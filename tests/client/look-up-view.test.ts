@@ -5,7 +5,10 @@ import { mountInApp } from '../support/client/mount.ts';
 import { fieldLabelled, messages } from './queries.ts';
 
 // The document of the tests has no canvas to draw on.
-vi.mock('../../src/components/charts/CapacityChart.vue', () => ({ default: { render: () => null } }));
+vi.mock('../../src/components/charts/CapacityChart.vue', () => ({
+  __esModule: true,
+  default: { render: () => null },
+}));
 
 const details = [
   {
