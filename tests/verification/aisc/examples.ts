@@ -81,7 +81,7 @@ a1.both(of('shear rupture', 'J4.2(b)'), rupture, '302', '201', () =>
   aisc.nominalShearRupture(65, 2 * (23.5 - 8 * 0.875) * t),
 );
 a1.both(of('block shear', 'J4.3'), rupture, '315', '210', () =>
-  aisc.nominalBlockShear({ Agv: 13.9, Anv: 9.8, Ant: 0.586, Fy: 50, Fu: 65, Ubs: 1 }),
+  aisc.nominalBlockShear(0.586, 13.9, 9.8, 50, 65, 1),
 );
 a1.both(of('bearing', 'J3.11a'), rupture, '27.5', '18.3', () => aisc.nominalBearing(0.75, t, 65, true), {
   lrfd: rounding('R_n', 36.6, 36.5625),
@@ -127,7 +127,7 @@ a11.both(
   rupture,
   '93.8',
   '62.5',
-  () => aisc.nominalBlockShear({ Agv: 3.625, Anv: 2.53125, Ant: 0.40625, Fy: 50, Fu: 65, Ubs: 1 }),
+  () => aisc.nominalBlockShear(0.40625, 3.625, 2.53125, 50, 65, 1),
   { asd: rounding('R_n', 125, 125.125) },
 );
 
@@ -144,15 +144,7 @@ a19.both(
   rupture,
   '145',
   '96.5',
-  () =>
-    aisc.nominalBlockShear({
-      Agv: 5.25,
-      Anv: 3.71875,
-      Ant: 1.46875,
-      Fy: 50,
-      Fu: 65,
-      Ubs: aisc.uniformity['coped-two-lines'],
-    }),
+  () => aisc.nominalBlockShear(1.46875, 5.25, 3.71875, 50, 65, aisc.uniformity['coped-two-lines']),
   { asd: rounding('R_n', 193, 192.766) },
 );
 
@@ -162,7 +154,7 @@ const hanger = {
   inputs: '2L3x3x5/16, x 0.860, WT6x17.5 stem 0.300',
 };
 d1.value({ ...hanger, state: 'stem block shear, nominal', clause: 'J4.3', unit: 'kip' }, '131', () =>
-  aisc.nominalBlockShear({ Agv: 2 * 4 * 0.3, Anv: 2 * 4 * 0.3, Ant: 3 * 0.3, Fy: 50, Fu: 65, Ubs: 1 }),
+  aisc.nominalBlockShear(3 * 0.3, 2 * 4 * 0.3, 2 * 4 * 0.3, 50, 65, 1),
 );
 const angles = { ...hanger, state: 'angle yield', clause: 'J4.1(a)', unit: 'kip' };
 d1.both(angles, yielding, '160', '107', () => aisc.nominalTensileYield(50, 3.56));
@@ -178,7 +170,7 @@ truss.both(one('tension rupture', 'D2(b)'), rupture, '784', null, () =>
   aisc.nominalTensileRupture(65, 17.58 * aisc.shearLagFactor(1.02, 12, 0)),
 );
 truss.both(one('block shear', 'J4.3'), rupture, '1080', null, () =>
-  aisc.nominalBlockShear({ Agv: 37.5, Anv: 25.2, Ant: 6.95, Fy: 50, Fu: 65, Ubs: 1 }),
+  aisc.nominalBlockShear(6.95, 37.5, 25.2, 50, 65, 1),
 );
 truss.value(one('bolt shear, nominal', 'J3.7'), '67.6', () =>
   aisc.nominalBoltShear({ Fnv: 68, Ab: (Math.PI * 1.125 * 1.125) / 4, planes: 1 }),

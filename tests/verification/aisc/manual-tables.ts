@@ -155,7 +155,7 @@ for (const [t, design, allowable] of [
     rupture,
     design,
     allowable,
-    () => aisc.nominalBlockShear({ Ant: t * Ant, Agv: t * Agv, Anv: t * Anv, Fy: 50, Fu: 65, Ubs: 1 }),
+    () => aisc.nominalBlockShear(t * Ant, t * Agv, t * Anv, 50, 65, 1),
     { lrfd: rounding('sum per inch', 249.6, 249.843), asd: rounding('sum per inch', 166.4, 166.562) },
   );
 }

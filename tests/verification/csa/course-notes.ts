@@ -46,7 +46,7 @@ const shank = (d: number) => (Math.PI * d * d) / 4;
 const kN = (newtons: number) => newtons / 1000;
 const intercepted = { threadsIntercepted: true, L: 0 };
 const block = (Ut: number, An: number, Agv: number, Fy: number, Fu: number) => () =>
-  kN(csa.blockResistance({ Ut, An, Agv, Fy, Fu }));
+  kN(csa.blockResistance(Ut, An, Agv, Fy, Fu));
 const metal = (D: number, degrees: number, Mw: number, length: number) => () =>
   kN(length * csa.filletWeldMetal({ D, Xu: 490, theta: (degrees * Math.PI) / 180, Mw }));
 
@@ -86,15 +86,7 @@ const c30 = example('C30', (r) => {
   r('block of the angle, U_t 0.6', '13.11', 'A_n 238, A_gv 858', '203', 'kN', block(0.6, 238, 858, 350, 450));
   r('tear-out of the web', '13.11', 'A_gv 1152', '207', 'kN', block(0, 0, 1152, 350, 450));
   r('block of the coped web, U_t 0.9', '13.11', 'A_n 307, A_gv 576', '197', 'kN', () =>
-    kN(
-      csa.blockResistance({
-        Ut: csa.tensionEfficiency['coped-one-line'],
-        An: 307,
-        Agv: 576,
-        Fy: 350,
-        Fu: 450,
-      }),
-    ),
+    kN(csa.blockResistance(csa.tensionEfficiency['coped-one-line'], 307, 576, 350, 450)),
   );
 });
 

@@ -146,7 +146,7 @@ function weldedParts(plate: ReturnType<typeof plateOf>): readonly FilletPart[] {
   const { thickness, supportThickness } = plate;
   return [
     { ...plate.plate, thickness, fillets: 2 },
-    { ...plate.support, thickness: supportThickness === 0 ? thickness : supportThickness, fillets: 1 },
+    { ...plate.support, thickness: supportThickness <= TOLERANCE ? thickness : supportThickness, fillets: 1 },
   ];
 }
 

@@ -126,7 +126,7 @@ class AiscBasis implements Basis {
     rec: Rec,
   ): number {
     const Ubs = uniformity[pull];
-    const strength = available(this.format, nominalBlockShear({ Ant, Agv, Anv, Fy, Fu, Ubs }), rupture);
+    const strength = available(this.format, nominalBlockShear(Ant, Agv, Anv, Fy, Fu, Ubs), rupture);
     if (rec !== null) {
       rec.line('U_bs', 'uniformity of the tension', '', Ubs, '', clauses.blockShear);
       const formula = `(0.60 min(F_u A_nv, F_y A_gv) + U_bs F_u A_nt) ${this.format.text(rupture)}`;

@@ -18,13 +18,13 @@ export const uniformity: Readonly<Record<BlockPull, number>> = {
  * A_nt net area in tension, A_gv and A_nv gross and net areas in shear, mm2; F_y, F_u MPa; U_bs from `uniformity`.
  * Nominal. ANSI/AISC 360-22, J4.3, equation (J4-5).
  */
-export function nominalBlockShear(i: {
-  Ant: number;
-  Agv: number;
-  Anv: number;
-  Fy: number;
-  Fu: number;
-  Ubs: number;
-}): number {
-  return 0.6 * Math.min(i.Fu * i.Anv, i.Fy * i.Agv) + i.Ubs * i.Fu * i.Ant;
+export function nominalBlockShear(
+  Ant: number,
+  Agv: number,
+  Anv: number,
+  Fy: number,
+  Fu: number,
+  Ubs: number,
+): number {
+  return 0.6 * Math.min(Fu * Anv, Fy * Agv) + Ubs * Fu * Ant;
 }

@@ -109,7 +109,7 @@ class CsaBasis implements Basis {
     rec: Rec,
   ): number {
     const Ut = tensionEfficiency[pull];
-    const strength = blockResistance({ An, Agv, Fy, Fu, Ut });
+    const strength = blockResistance(Ut, An, Agv, Fy, Fu);
     if (rec !== null) {
       const clause = clauses.blockShear;
       rec.line('U_t', 'efficiency of the tension plane', '', Ut, '', clause);
@@ -121,7 +121,7 @@ class CsaBasis implements Basis {
   }
 
   tearOut(Agv: number, Fy: number, Fu: number, rec: Rec): number {
-    const strength = blockResistance({ An: 0, Agv, Fy, Fu, Ut: 0 });
+    const strength = blockResistance(0, 0, Agv, Fy, Fu);
     if (rec !== null) {
       const clause = clauses.blockShear;
       rec.line('', 'tear-out, two planes along every line', '', '', '', '');

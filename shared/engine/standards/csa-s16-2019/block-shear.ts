@@ -29,6 +29,6 @@ export function shearPlaneStress(Fy: number, Fu: number): number {
  * A_n net area in tension, A_gv gross area in shear, mm2; F_y, F_u MPa; U_t from `tensionEfficiency`. With A_n = 0 it
  * is the tear-out of bolts along two planes each. CSA S16:19, 13.11.
  */
-export function blockResistance(i: { An: number; Agv: number; Fy: number; Fu: number; Ut: number }): number {
-  return phiu * (i.Ut * i.An * i.Fu + i.Agv * shearPlaneStress(i.Fy, i.Fu));
+export function blockResistance(Ut: number, An: number, Agv: number, Fy: number, Fu: number): number {
+  return phiu * (Ut * An * Fu + Agv * shearPlaneStress(Fy, Fu));
 }
