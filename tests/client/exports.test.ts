@@ -2,7 +2,13 @@ import type { ResultAxes } from '@shared/contracts/revisions.ts';
 import { flushPromises } from '@vue/test-utils';
 import { beforeEach, describe, expect, it, vi } from 'vitest';
 import { issuedRevisions } from '../../src/components/exports/issued.ts';
-import { requestOf, restOf, sizeOf, usualPlan } from '../../src/components/exports/table-plan.ts';
+import {
+  fittingPlan,
+  requestOf,
+  restOf,
+  sizeOf,
+  usualPlan,
+} from '../../src/components/exports/table-plan.ts';
 import TableForm from '../../src/components/exports/TableForm.vue';
 import { dimensionsOf } from '../../src/components/results/dimensions.ts';
 import { mountInApp } from '../support/client/mount.ts';
@@ -41,6 +47,14 @@ describe('the plan of a table', () => {
     const held = { ...plan, held: { plate_thickness: 2 } };
     expect(sizeOf(held, dimensions).sheets).toBe(1);
     expect(requestOf(held, axes, dimensions).held).toEqual({ plate_thickness: 16 });
+  });
+
+  it('holds the load angle nearest to 0 where it stands neither down nor across', () => {
+    const plan = { ...usualPlan(axes, dimensions), down: ['plate_thickness'], across: 'bolt_size' };
+    const fitting = fittingPlan(plan, axes);
+    expect(requestOf(fitting, axes, dimensions).held).toEqual({ angle: 0 });
+    expect(sizeOf(fitting, dimensions)).toEqual({ rows: 3, columns: 2, sheets: 1 });
+    expect(fittingPlan(usualPlan(axes, dimensions), axes).held).toEqual({});
   });
 
   it('sends no held value for what stands down after all', () => {

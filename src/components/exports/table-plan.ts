@@ -35,6 +35,15 @@ export function usualPlan(axes: ResultAxes, dimensions: readonly Dimension[]): T
 export const restOf = (plan: TablePlan, dimensions: readonly Dimension[]): Dimension[] =>
   dimensions.filter(({ name }) => name !== plan.across && !plan.down.includes(name));
 
+/** The load angle makes no sheets: where it stands neither down nor across it is held, at first nearest to 0°. */
+export function fittingPlan(plan: TablePlan, axes: ResultAxes): TablePlan {
+  const stands = plan.across === ANGLE || plan.down.includes(ANGLE) || plan.held[ANGLE] !== undefined;
+  if (stands) return plan;
+  const size = (place: number) => Math.abs(axes.angles[place] ?? 0);
+  const nearest = axes.angles.reduce((best, _, place) => (size(place) < size(best) ? place : best), 0);
+  return { ...plan, held: { ...plan.held, [ANGLE]: nearest } };
+}
+
 /** How large the workbook gets. */
 export function sizeOf(plan: TablePlan, dimensions: readonly Dimension[]) {
   const many = (name: string) => dimensions.find((dimension) => dimension.name === name)?.titles.length ?? 1;
