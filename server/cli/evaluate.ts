@@ -1,5 +1,6 @@
 import { engineCatalogue } from '../catalogue.ts';
 import { evaluateCase } from './evaluate-case.ts';
+import { print } from './print.ts';
 import { readCases, UnreadableInput } from './read-cases.ts';
 
 /*
@@ -10,7 +11,7 @@ import { readCases, UnreadableInput } from './read-cases.ts';
 try {
   const cases = readCases(process.argv[2]);
   const lines = cases.map((given) => JSON.stringify(evaluateCase(given, engineCatalogue())));
-  process.stdout.write(lines.length === 0 ? '[]\n' : `[\n${lines.join(',\n')}\n]\n`);
+  print(lines.length === 0 ? '[]\n' : `[\n${lines.join(',\n')}\n]\n`);
 } catch (error) {
   if (!(error instanceof UnreadableInput)) throw error;
   process.stderr.write(`${error.message}\n`);
