@@ -6,6 +6,7 @@ import type { Basis, BearingStrength, Rec } from '../standards/basis.ts';
  * The row ahead has the free end before it (Infinity: none), every other row has the next row before it.
  * @param end, pitch, edge, gauge mm; Infinity where there is none
  * @param boltShear shear resistance of one bolt, all planes, N: some bases compare it with the bearing
+ * @param shares takes the strength of each bolt, row by row and line by line; `aheadRow` has the end before it
  */
 export function alignedBearing(
   basis: Basis,
@@ -18,12 +19,15 @@ export function alignedBearing(
   gauge: number,
   boltShear: number,
   rec: Rec,
+  shares: Float64Array | null = null,
+  aheadRow = 0,
 ): number {
   if (rec !== null) rec.line('', 'row ahead', '', `${lines} of ${rows * lines} bolts`, '', '');
   const ahead = ply.bolt(end, Infinity, edge, gauge, rec);
   let least = ahead;
   let most = ahead;
   let sum = lines * ahead;
+  shares?.fill(ahead);
   if (rows > 1) {
     if (rec !== null)
       rec.line('', 'rows behind', '', `${(rows - 1) * lines} of ${rows * lines} bolts`, '', '');
@@ -31,6 +35,10 @@ export function alignedBearing(
     least = Math.min(least, behind);
     most = Math.max(most, behind);
     sum += (rows - 1) * lines * behind;
+    if (shares !== null) {
+      shares.fill(behind);
+      shares.fill(ahead, aheadRow * lines, (aheadRow + 1) * lines);
+    }
   }
   return basis.bearingGroup(rows * lines, least, most, sum, boltShear, rec);
 }
@@ -56,6 +64,7 @@ export interface InclinedGroup {
  * end on the side pushed to and the edges of the other direction. The welded edge is no free end. Pitch ahead
  * and gauge enter both directions. With the force along an edge this is the plain rule.
  * @param sign +1 where the bolts push the plate away from the support, -1 towards it
+ * @param shares takes the strength of each bolt, row by row and line by line
  */
 export function inclinedBearing(
   basis: Basis,
@@ -65,6 +74,7 @@ export function inclinedBearing(
   sin: number,
   sign: number,
   boltShear: number,
+  shares: Float64Array,
   rec: Rec,
 ): number {
   const { rows, lines } = group;
@@ -80,6 +90,7 @@ export function inclinedBearing(
     }
     most = Math.max(most, strength);
     sum += strength;
+    shares[bolt] = strength;
   }
   if (rec !== null) recordWeakest(ply, group, weakest, cos, sin, sign, least, rec);
   return basis.bearingGroup(rows * lines, least, most, sum, boltShear, rec);
@@ -104,8 +115,7 @@ function recordWeakest(
   rec.line('R_b,min', 'weakest bolt along the force', '', strength, 'N', method);
 }
 
-/** Strength of one bolt along the force by the same method, N; bolts are numbered row by row, line by line. */
-export function inclinedBolt(
+function inclinedBolt(
   ply: BearingStrength,
   group: InclinedGroup,
   bolt: number,

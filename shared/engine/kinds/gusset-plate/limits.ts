@@ -1,4 +1,4 @@
-import { alignedBearing, inclinedBearing, inclinedBolt } from '../../limit-states/bearing.ts';
+import { alignedBearing, inclinedBearing } from '../../limit-states/bearing.ts';
 import { blockCapacity } from '../../limit-states/block-shear.ts';
 import { plateSectionCapacity } from '../../limit-states/plate-section.ts';
 import { weldLineCapacity } from '../../limit-states/weld-line.ts';
@@ -77,7 +77,7 @@ export function boltShear(m: GussetModel, rec: Rec): number {
 export function gussetBearing(m: GussetModel, v: GussetView, oneBolt: number, rec: Rec): number {
   if (!m.tapered) {
     const sign = v.tension ? 1 : -1;
-    return inclinedBearing(m.basis, m.plateBearing, m.inclined, v.cos, v.sin, sign, oneBolt, rec);
+    return inclinedBearing(m.basis, m.plateBearing, m.inclined, v.cos, v.sin, sign, oneBolt, m.shares, rec);
   }
   const end = v.tension ? m.cutDistance - m.lastRow : Infinity;
   const gauge = m.lines === 2 ? m.gauge : Infinity;
@@ -92,6 +92,8 @@ export function gussetBearing(m: GussetModel, v: GussetView, oneBolt: number, re
     gauge,
     oneBolt,
     rec,
+    m.shares,
+    v.tension ? m.rows - 1 : 0,
   );
 }
 
@@ -119,7 +121,7 @@ export function memberBearing(m: GussetModel, tension: boolean, oneBolt: number,
 /**
  * Bearing on the brace where each bolt counts for what it takes in shear and on both plies, N: the sum of the lesser
  * of gusset and brace over the bolts. In tension the first row has the end of the brace ahead, the last that of the
- * gusset.
+ * gusset. Reads what `gussetBearing` found for each bolt at this angle.
  */
 export function sharedBearing(m: GussetModel, v: GussetView, rec: Rec): number {
   const { member, rows, lines, pitch } = m;
@@ -132,32 +134,13 @@ export function sharedBearing(m: GussetModel, v: GussetView, rec: Rec): number {
   let sum = 0;
   for (let row = 0; row < rows; row++) {
     const onMember = row === (v.tension ? 0 : rows - 1) ? ahead : behind;
-    for (let line = 0; line < lines; line++) sum += Math.min(onMember, gussetBolt(m, v, row, line));
+    for (let line = 0; line < lines; line++) sum += Math.min(onMember, m.shares[row * lines + line]!);
   }
   if (rec !== null) {
     const meaning = 'each bolt, the lesser on brace and gusset';
     rec.line('Σ', meaning, '', sum, 'N', m.basis.clauses.bearing);
   }
   return sum;
-}
-
-/** What one bolt takes on the gusset, N. */
-function gussetBolt(m: GussetModel, v: GussetView, row: number, line: number): number {
-  if (!m.tapered) {
-    return inclinedBolt(
-      m.plateBearing,
-      m.inclined,
-      row * m.lines + line,
-      v.cos,
-      v.sin,
-      v.tension ? 1 : -1,
-      null,
-    );
-  }
-  const gauge = m.lines === 2 ? m.gauge : Infinity;
-  const isAhead = row === (v.tension ? m.rows - 1 : 0);
-  const end = v.tension && isAhead ? m.cutDistance - m.lastRow : Infinity;
-  return m.plateBearing.bolt(end, isAhead ? Infinity : m.pitch, edgeBeside(m, v), gauge, null);
 }
 
 /** A block of the gusset torn outwards, N: tension only. */

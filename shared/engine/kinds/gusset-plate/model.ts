@@ -64,6 +64,8 @@ export interface GussetModel {
   readonly memberBearing: BearingStrength;
   readonly plateBlock: BlockPly;
   readonly inclined: InclinedGroup;
+  /** What each bolt takes on the gusset at the angle last evaluated, N. */
+  readonly shares: Float64Array;
 }
 
 /** Puts checked parameters and a basis together. */
@@ -129,6 +131,7 @@ export function buildModel(values: Resolved, basis: Basis): GussetModel {
     memberBearing: basis.bearing({ ...lap, thickness: member.bearingThickness, fu: member.steel.fu }),
     plateBlock: { thickness, deduction, fy, fu, rows, lines, gauge, angle: false },
     inclined: { ...layout, offset, projection, halfHeight },
+    shares: new Float64Array(rows * lines),
   };
 }
 

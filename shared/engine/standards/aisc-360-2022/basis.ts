@@ -20,7 +20,7 @@ import { longJointFactor, nominalBoltShear, stressesOf } from './bolt-shear.ts';
 import { criticalStress, E, nominalTensileRupture, nominalTensileYield } from './connected-elements.ts';
 import { detailing, standardClearance } from './detailing.ts';
 import { AiscFillet } from './fillet-line.ts';
-import { asd, available, type Format, lrfd, rupture, yielding } from './format.ts';
+import { asd, type Format, lrfd, rupture, yielding } from './format.ts';
 import { infoOf } from './notes.ts';
 import { shearLagFactor } from './shear-lag.ts';
 
@@ -44,12 +44,16 @@ class AiscBasis implements Basis {
   readonly detailing = detailing;
   readonly modulus = E;
   readonly boltByBolt = true;
+  private readonly ofRupture: number;
+  private readonly ofYielding: number;
 
   constructor(
     private readonly format: Format,
     readonly factors: PartialFactors,
   ) {
     this.info = infoOf(format);
+    this.ofRupture = format.factor(rupture);
+    this.ofYielding = format.factor(yielding);
   }
 
   normalHole(size: BoltSize, catalogued: CatalogueBoltSize | null): number | null {
@@ -78,7 +82,7 @@ class AiscBasis implements Basis {
     const { fnvN, fnvX } = stressesOf(bolt.grade);
     const factor = longJointFactor(jointLength);
     const Fnv = factor * (threadsInPlane ? fnvN : fnvX);
-    const strength = available(this.format, nominalBoltShear({ Fnv, Ab, planes }), rupture);
+    const strength = this.ofRupture * nominalBoltShear({ Fnv, Ab, planes });
     if (rec !== null) {
       const clause = clauses.boltShear;
       const threads = threadsInPlane ? 'threads in the planes (N)' : 'threads out of the planes (X)';
@@ -113,7 +117,7 @@ class AiscBasis implements Basis {
   }
 
   yieldStress(fy: number): number {
-    return available(this.format, fy, yielding);
+    return this.ofYielding * fy;
   }
 
   blockShear(
@@ -126,7 +130,7 @@ class AiscBasis implements Basis {
     rec: Rec,
   ): number {
     const Ubs = uniformity[pull];
-    const strength = available(this.format, nominalBlockShear(Ant, Agv, Anv, Fy, Fu, Ubs), rupture);
+    const strength = this.ofRupture * nominalBlockShear(Ant, Agv, Anv, Fy, Fu, Ubs);
     if (rec !== null) {
       rec.line('U_bs', 'uniformity of the tension', '', Ubs, '', clauses.blockShear);
       const formula = `(0.60 min(F_u A_nv, F_y A_gv) + U_bs F_u A_nt) ${this.format.text(rupture)}`;
@@ -140,7 +144,7 @@ class AiscBasis implements Basis {
   }
 
   tensionYield(area: number, fy: number, rec: Rec): number {
-    const strength = available(this.format, nominalTensileYield(fy, area), yielding);
+    const strength = this.ofYielding * nominalTensileYield(fy, area);
     if (rec !== null) {
       rec.line(
         'R_y',
@@ -155,7 +159,7 @@ class AiscBasis implements Basis {
   }
 
   tensionRupture(net: number, fu: number, rec: Rec): number {
-    const strength = available(this.format, nominalTensileRupture(fu, net), rupture);
+    const strength = this.ofRupture * nominalTensileRupture(fu, net);
     if (rec !== null) {
       rec.line(
         'R_u',
@@ -171,7 +175,7 @@ class AiscBasis implements Basis {
 
   compression(area: number, fy: number, Lcr: number, rec: Rec): number {
     const Fcr = criticalStress(fy, Lcr);
-    const strength = available(this.format, Fcr * area, yielding);
+    const strength = this.ofYielding * Fcr * area;
     if (rec !== null) {
       const clause = clauses.compression;
       const formula = 'F_y to L_c/r = 25; 0.658^(F_y/F_e) F_y; 0.877 F_e for F_y/F_e > 2.25';

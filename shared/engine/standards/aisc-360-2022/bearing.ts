@@ -35,6 +35,9 @@ export class AiscBearing implements BearingStrength {
   private readonly bearing: number;
   /** Tear-out per millimetre of clear distance. */
   private readonly perClear: number;
+  private readonly dh: number;
+  /** The lesser of bearing and shear. */
+  private readonly most: number;
 
   constructor(
     private readonly ply: BearingPly,
@@ -42,14 +45,16 @@ export class AiscBearing implements BearingStrength {
   ) {
     const { size, thickness, fu, deformationMatters } = ply;
     const factor = format.factor(rupture);
+    this.dh = ply.holeDiameter;
     this.bearing = factor * nominalBearing(size.d, thickness, fu, deformationMatters);
     this.perClear = factor * nominalTearOut(1, thickness, fu, deformationMatters);
+    this.most = Math.min(this.bearing, ply.boltShear);
   }
 
   bolt(end: number, pitch: number, _edge: number, _gauge: number, rec: Rec): number {
-    const lc = clearDistance(end, pitch, this.ply.holeDiameter);
-    const tearOut = lc === Infinity ? Infinity : this.perClear * lc;
-    const strength = Math.min(this.bearing, tearOut, this.ply.boltShear);
+    const lc = clearDistance(end, pitch, this.dh);
+    const tearOut = this.perClear * lc;
+    const strength = Math.min(this.most, tearOut);
     if (rec !== null) this.recordBolt(lc, tearOut, strength, rec);
     return strength;
   }
