@@ -284,7 +284,7 @@ test('the demo people are shown in demo mode alone, and can sign in there', asyn
   const demo = await createHarness({ BACKMARK_DEMO: 'true' });
   await demo.db.execute('DELETE FROM people');
   expect((await demo.stranger().get('/api/auth/demo-people').expect(200)).body).toEqual({ people: [] });
-  expect(await addDemoPeople(demo.app)).toBe(4);
+  expect(await addDemoPeople(demo.app)).toBe(6);
   expect(await addDemoPeople(demo.app)).toBe(0);
   const { body } = await demo.stranger().get('/api/auth/demo-people').expect(200);
   for (const { email, password: secret, role } of (body as z.output<typeof demoPeopleResponse>).people) {
@@ -293,7 +293,7 @@ test('the demo people are shown in demo mode alone, and can sign in there', asyn
   }
   await demo.db.execute("UPDATE people SET state = 'disabled' WHERE role = 'drafter'");
   const fewer = await demo.stranger().get('/api/auth/demo-people').expect(200);
-  expect((fewer.body as { people: unknown[] }).people).toHaveLength(3);
+  expect((fewer.body as { people: unknown[] }).people).toHaveLength(5);
   await demo.close();
 });
 
