@@ -16,7 +16,10 @@ export const auditEntry = z.object({
   hash: z.string(),
 });
 export type AuditEntry = z.infer<typeof auditEntry>;
-export const auditListResponse = z.object({ entries: z.array(auditEntry), next: z.number().int().nullable() });
+export const auditListResponse = z.object({
+  entries: z.array(auditEntry),
+  next: z.number().int().nullable(),
+});
 export const auditVerificationResponse = z.object({
   valid: z.boolean(),
   entries: z.number().int(),

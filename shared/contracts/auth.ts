@@ -8,7 +8,10 @@ export const newPasswordSchema = z
   .max(200, 'A password may have at most 200 characters.');
 
 export const signInRequest = z.strictObject({ email: emailSchema, password: z.string().min(1).max(1000) });
-export const changePasswordRequest = z.strictObject({ current: z.string().min(1).max(1000), next: newPasswordSchema });
+export const changePasswordRequest = z.strictObject({
+  current: z.string().min(1).max(1000),
+  next: newPasswordSchema,
+});
 
 /** What the signed-in person may do beyond single records. */
 export const personAbilities = z.object({

@@ -21,7 +21,10 @@ export const LIMITS = {
 
 export const parameterSettingSchema = z.discriminatedUnion('mode', [
   z.strictObject({ mode: z.literal('fixed'), value: parameterValueSchema }),
-  z.strictObject({ mode: z.literal('list'), values: z.array(parameterValueSchema).min(1).max(LIMITS.values) }),
+  z.strictObject({
+    mode: z.literal('list'),
+    values: z.array(parameterValueSchema).min(1).max(LIMITS.values),
+  }),
   z.strictObject({
     mode: z.literal('range'),
     from: z.number(),
@@ -39,7 +42,10 @@ export const angleGridSchema = z.discriminatedUnion('mode', [
     to: z.number().min(-180).max(180),
     step: z.number().min(0.25).max(180),
   }),
-  z.strictObject({ mode: z.literal('list'), values: z.array(z.number().min(-180).max(180)).min(1).max(LIMITS.angles) }),
+  z.strictObject({
+    mode: z.literal('list'),
+    values: z.array(z.number().min(-180).max(180)).min(1).max(LIMITS.angles),
+  }),
 ]);
 export type AngleGrid = z.infer<typeof angleGridSchema>;
 

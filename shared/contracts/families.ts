@@ -12,7 +12,10 @@ export const createFamilyRequest = z.strictObject({
   title: z.string().trim().min(3).max(120),
   definition: definitionSchema,
 });
-export const updateFamilyRequest = z.strictObject({ code: familyCodeSchema, title: z.string().trim().min(3).max(120) });
+export const updateFamilyRequest = z.strictObject({
+  code: familyCodeSchema,
+  title: z.string().trim().min(3).max(120),
+});
 
 export const revisionSummary = z.object({
   id: idSchema,
@@ -42,8 +45,15 @@ export const familyResponse = z.object({
   can: z.object({ edit: z.boolean(), startRevision: z.boolean() }),
 });
 export type Family = z.infer<typeof familyResponse>;
-export const familyListResponse = z.object({ families: z.array(familyResponse), can: z.object({ create: z.boolean() }) });
+export const familyListResponse = z.object({
+  families: z.array(familyResponse),
+  can: z.object({ create: z.boolean() }),
+});
 
 /** Answer to a faulty or hopeless definition before it is saved: counts and every fault. */
 export const definitionCheckRequest = z.strictObject({ definition: definitionSchema });
-export const definitionCheckResponse = z.object({ variants: z.number(), angles: z.number(), cells: z.number() });
+export const definitionCheckResponse = z.object({
+  variants: z.number(),
+  angles: z.number(),
+  cells: z.number(),
+});

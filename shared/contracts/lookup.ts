@@ -19,9 +19,17 @@ export const lookupDetailsResponse = z.object({
       angleMinimum: z.number(),
       angleMaximum: z.number(),
       choices: z.array(
-        z.object({ name: z.string(), label: z.string(), symbol: z.string(), unit: z.string(), values: z.array(parameterValueSchema) }),
+        z.object({
+          name: z.string(),
+          label: z.string(),
+          symbol: z.string(),
+          unit: z.string(),
+          values: z.array(parameterValueSchema),
+        }),
       ),
-      fixed: z.array(z.object({ name: z.string(), label: z.string(), unit: z.string(), value: parameterValueSchema })),
+      fixed: z.array(
+        z.object({ name: z.string(), label: z.string(), unit: z.string(), value: parameterValueSchema }),
+      ),
     }),
   ),
 });
@@ -58,14 +66,24 @@ export const lookupResponse = z.object({
       capacity: z.number(),
       /** kN before rounding, for verification. */
       unrounded: z.number(),
-      governing: z.object({ id: z.string(), code: z.string(), title: z.string(), part: z.string(), clause: z.string() }),
+      governing: z.object({
+        id: z.string(),
+        code: z.string(),
+        title: z.string(),
+        part: z.string(),
+        clause: z.string(),
+      }),
       utilisation: z.number().nullable(),
       adequate: z.boolean().nullable(),
     }),
     z.object({ status: z.literal('not-permitted'), rejections: z.array(rejectionSchema) }),
     z.object({ status: z.literal('not-covered'), reason: z.string() }),
   ]),
-  curve: z.object({ angles: z.array(z.number()), capacity: z.array(z.number().nullable()), governing: z.array(z.number().int()) }),
+  curve: z.object({
+    angles: z.array(z.number()),
+    capacity: z.array(z.number().nullable()),
+    governing: z.array(z.number().int()),
+  }),
   legend: z.array(z.object({ id: z.string(), code: z.string(), title: z.string(), part: z.string() })),
   notes: z.array(z.string()),
   cautions: z.array(z.string()),

@@ -26,7 +26,12 @@ export const revisionResponse = z.object({
   publishedAt: instantSchema.nullable(),
   lockedAt: instantSchema.nullable(),
   signatures: z.array(
-    z.object({ person: personRefSchema, verdict: z.enum(['signed', 'returned']), comment: z.string(), at: instantSchema }),
+    z.object({
+      person: personRefSchema,
+      verdict: z.enum(['signed', 'returned']),
+      comment: z.string(),
+      at: instantSchema,
+    }),
   ),
   sweep: z.object({ id: idSchema, state: z.string() }).nullable(),
   withdrawnReason: z.string().nullable(),
@@ -79,14 +84,24 @@ export const resultAxesResponse = z.object({
   revisionId: idSchema,
   /** Swept parameters, in ordinal order: the last varies fastest. */
   axes: z.array(
-    z.object({ name: z.string(), label: z.string(), symbol: z.string(), unit: z.string(), values: z.array(z.unknown()) }),
+    z.object({
+      name: z.string(),
+      label: z.string(),
+      symbol: z.string(),
+      unit: z.string(),
+      values: z.array(z.unknown()),
+    }),
   ),
   angles: z.array(z.number()),
   senses: z.array(senseSchema),
   increment: z.number(),
   variants: z.number().int(),
-  limitStates: z.array(z.object({ id: z.string(), code: z.string(), title: z.string(), part: z.string(), clause: z.string() })),
-  rules: z.array(z.object({ rule: z.string(), title: z.string(), clause: z.string(), cells: z.number().int() })),
+  limitStates: z.array(
+    z.object({ id: z.string(), code: z.string(), title: z.string(), part: z.string(), clause: z.string() }),
+  ),
+  rules: z.array(
+    z.object({ rule: z.string(), title: z.string(), clause: z.string(), cells: z.number().int() }),
+  ),
   lowest: z.number().nullable(),
   highest: z.number().nullable(),
   rejectedCells: z.number().int(),
@@ -116,13 +131,22 @@ export type ResultBlock = z.infer<typeof resultBlockResponse>;
 export const variantParams = z.strictObject({ id: idSchema, ordinal: z.coerce.number().int().min(0) });
 
 /** Curve of one variant: the envelope and every limit state, kN, at the given angles. */
-export const curveQuery = z.strictObject({ sense: senseSchema, step: z.coerce.number().min(0.5).max(15).default(1) });
+export const curveQuery = z.strictObject({
+  sense: senseSchema,
+  step: z.coerce.number().min(0.5).max(15).default(1),
+});
 export const curveResponse = z.object({
   angles: z.array(z.number()),
   capacity: z.array(z.number().nullable()),
   governing: z.array(z.number().int()),
   limitStates: z.array(
-    z.object({ id: z.string(), code: z.string(), title: z.string(), part: z.string(), capacity: z.array(z.number().nullable()) }),
+    z.object({
+      id: z.string(),
+      code: z.string(),
+      title: z.string(),
+      part: z.string(),
+      capacity: z.array(z.number().nullable()),
+    }),
   ),
 });
 export type Curve = z.infer<typeof curveResponse>;
@@ -139,16 +163,33 @@ export const rejectionSchema = z.object({
 });
 export const sheetResponse = z.object({
   family: z.object({ code: z.string(), title: z.string() }),
-  revision: z.object({ id: idSchema, letter: z.string().nullable(), state: revisionStateSchema, shortHash: z.string().nullable() }),
+  revision: z.object({
+    id: idSchema,
+    letter: z.string().nullable(),
+    state: revisionStateSchema,
+    shortHash: z.string().nullable(),
+  }),
   basis: z.object({ id: z.string(), title: z.string(), resultLabel: z.string() }),
   engineVersion: z.string(),
   angle: z.number(),
   sense: senseSchema,
   parameters: z.array(
-    z.object({ name: z.string(), label: z.string(), symbol: z.string(), unit: z.string(), group: z.string(), value: z.unknown() }),
+    z.object({
+      name: z.string(),
+      label: z.string(),
+      symbol: z.string(),
+      unit: z.string(),
+      group: z.string(),
+      value: z.unknown(),
+    }),
   ),
   outcome: z.discriminatedUnion('status', [
-    z.object({ status: z.literal('capacity'), capacity: z.number(), rounded: z.number(), governing: z.string() }),
+    z.object({
+      status: z.literal('capacity'),
+      capacity: z.number(),
+      rounded: z.number(),
+      governing: z.string(),
+    }),
     z.object({ status: z.literal('not-permitted'), rejections: z.array(rejectionSchema) }),
     z.object({ status: z.literal('not-covered'), reason: z.string() }),
   ]),
