@@ -1,12 +1,13 @@
 import { fileURLToPath } from 'node:url';
 import vue from '@vitejs/plugin-vue';
 import vuetify from 'vite-plugin-vuetify';
-import { defineConfig } from 'vite';
+import { defineConfig } from 'vitest/config';
+import { projectsWith } from './tests/projects.ts';
 
 const folder = (name: string) => fileURLToPath(new URL(`./${name}`, import.meta.url));
 
-/** The folders that may be named from anywhere; tsconfig.base.json lists the same three. */
-export const alias = {
+/** The folders that may be named from anywhere; tsconfig.json lists the same three. */
+const alias = {
   '@shared': folder('shared'),
   '@catalog': folder('catalog'),
   '@server': folder('server'),
@@ -27,4 +28,8 @@ export default defineConfig({
     chunkSizeWarningLimit: 700,
   },
   server: { host: '127.0.0.1', proxy: { '/api': apiAddress } },
+  test: {
+    coverage: { include: ['shared/**', 'server/**', 'src/**'], exclude: ['server/dev/**'] },
+    projects: projectsWith(alias),
+  },
 });

@@ -28,6 +28,10 @@ const jobs = bringUp(app, background);
 for (const signal of ['SIGINT', 'SIGTERM'] as const) {
   process.on(signal, () => void shutDown({ app, server, jobs, stopping }));
 }
+// The start command is gone, and with it the database: nothing is left to serve.
+process.on('disconnect', () => void shutDown({ app, server, jobs, stopping }));
+// A reader of our output that has gone is no reason to stop.
+for (const stream of [process.stdout, process.stderr]) stream.on('error', () => undefined);
 process.on('unhandledRejection', (error) => app.log.error({ err: error }, 'unhandled rejection'));
 
 try {

@@ -13,7 +13,7 @@ const sources = [
   'server',
   'shared',
   'src',
-  'tsconfig.base.json',
+  'tsconfig.json',
   'vite.config.ts',
 ];
 

@@ -67,6 +67,8 @@ async function start(folder, lock) {
   if (program.connected) program.send('prepared');
 }
 
+// Whoever read our output may go; the database and the program are still to be stopped in order.
+for (const stream of [process.stdout, process.stderr]) stream.on('error', () => undefined);
 loadEnvironmentFile();
 const folder = dataFolder();
 const lock = takeLock(join(folder, 'running.json'));

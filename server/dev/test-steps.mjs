@@ -6,7 +6,7 @@ import { run } from './run.mjs';
 
 const visible = { stdio: ['ignore', 1, 2] };
 
-/** Vitest projects and the folders their tests lie in; vitest.config.ts has the same. */
+/** Vitest projects and the folders their tests lie in; tests/projects.ts has the same. */
 export const testProjects = {
   engine: ['tests/engine', 'tests/verification', 'tests/catalog'],
   api: ['tests/api', 'tests/faults'],
