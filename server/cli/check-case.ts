@@ -46,8 +46,9 @@ export function checkCase(entry: unknown): CheckedCase {
   const values = mergedValues(entry, fault);
   if (kind === undefined || basis === undefined) return { faults };
   const angle = entry.angle as number;
+  const sense = (entry.sense as Sense | undefined) ?? kind.senses[0] ?? 'tension';
   const factors = basis.hasPartialFactors ? (entry.factors as Partial<PartialFactors>) : undefined;
-  return { faults, named: { kind, basis, values, angle, sense: entry.sense as Sense, factors } };
+  return { faults, named: { kind, basis, values, angle, sense, factors } };
 }
 
 function namedIn(
@@ -70,7 +71,8 @@ function namedIn(
     fault('angle', angle, 'Must be a load angle from -180 to 180 degrees');
   }
   const senses: readonly unknown[] = kind?.senses ?? ['tension', 'compression'];
-  if (!senses.includes(given.sense)) fault('sense', given.sense, `Must be one of ${senses.join(', ')}`);
+  if (given.sense !== undefined && !senses.includes(given.sense))
+    fault('sense', given.sense, `Must be one of ${senses.join(', ')}`);
   checkFactors(given, basis, fault);
   return { kind, basis };
 }

@@ -65,6 +65,7 @@ function describeParameter(spec: ParameterSpec) {
     choices: choices?.map(({ value, label: title, help: meaning }) => ({ value, title, meaning })),
     default: spec.default,
     meaning: help,
+    zeroMeans: spec.zero,
     usedWhen: when,
     usedByBases: used,
   };

@@ -1,3 +1,6 @@
+import type { DetailGeometry } from './detail-geometry.ts';
+import type { EngineCatalogue } from './engine-catalogue.ts';
+
 /**
  * The words of the engine. Inside it: newtons, millimetres, megapascals, radians;
  * kN and degrees exist only at the edges (API, screens, files, command line).
@@ -5,6 +8,9 @@
 
 /** Which way the resultant acts along the axis of the connected member. */
 export type Sense = 'tension' | 'compression';
+
+export type * from './detail-geometry.ts';
+export type * from './engine-catalogue.ts';
 
 export type BasisId =
   'sans-10162-1-2011' | 'csa-s16-2019' | 'en-1993-1-8-2005' | 'aisc-360-2022-lrfd' | 'aisc-360-2022-asd';
@@ -90,6 +96,8 @@ export interface ParameterSpec {
   readonly choices?: readonly { readonly value: string; readonly label: string; readonly help: string }[];
   readonly default: ParameterValue;
   readonly help: string;
+  /** What 0 stands for where it is no size, e.g. `normal hole of the basis`. */
+  readonly zero?: string;
   /** Shown and used only when another parameter has one of these values. */
   readonly when?: { readonly parameter: string; readonly is: readonly string[] };
   /** Only these bases use it; absent means all. */
@@ -172,33 +180,6 @@ export interface BasisInfo {
   readonly notes: readonly { readonly id: string; readonly text: string; readonly clause: string }[];
 }
 
-/** Geometry in the plane of the plate: x away from the support's face, y along it, millimetres. */
-export interface Point {
-  readonly x: number;
-  readonly y: number;
-}
-export interface DetailGeometry {
-  readonly outline: readonly Point[];
-  readonly holes: readonly { readonly centre: Point; readonly diameter: number }[];
-  readonly welds: readonly {
-    readonly from: Point;
-    readonly to: Point;
-    readonly leg: number;
-    readonly bothSides: boolean;
-  }[];
-  /** Outlines of the connected member's parts in this view, nearest last. */
-  readonly member: readonly { readonly outline: readonly Point[]; readonly hidden: boolean }[];
-  readonly axis: { readonly from: Point; readonly to: Point };
-  readonly dimensions: readonly {
-    readonly from: Point;
-    readonly to: Point;
-    readonly text: string;
-    /** Signed distance of the dimension line from the measured line, mm of drawing. */
-    readonly offset: number;
-  }[];
-  readonly thickness: number;
-}
-
 /** What a cell holds. A rejected cell is never an error, a zero or a blank. */
 export type CellOutcome =
   | {
@@ -241,37 +222,6 @@ export interface PreparedDetail {
   /** The same path as `at`, written down line by line. */
   record(theta: number, sense: Sense): SheetSection[];
   geometry(theta: number): DetailGeometry;
-}
-
-/** The reference data a kind needs; plain data so that it can cross to a worker or a browser. */
-export interface EngineCatalogue {
-  readonly boltSizes: readonly (BoltSize & {
-    /** Normal round holes; null where the standard lists none for this size. */
-    readonly hole: {
-      readonly en: number;
-      readonly sans: number;
-      readonly csa: number | null;
-      readonly aisc: number | null;
-    };
-  })[];
-  readonly boltGrades: readonly {
-    readonly name: string;
-    readonly fyb: number;
-    /** Nominal strength, used by EN; MPa; null for a grade that EN does not have. */
-    readonly nominal: number | null;
-    /** Minimum tensile strength by size, used by SANS and CSA: first band whose dMax is not below d. */
-    readonly minimum: readonly { readonly dMax: number; readonly fub: number }[];
-    /** Stresses of AISC 360 Table J3.2 by size, read as `minimum`. */
-    readonly aisc: readonly (BoltStresses & { readonly dMax: number })[];
-    readonly source: string;
-  }[];
-  readonly steels: readonly {
-    readonly name: string;
-    readonly bands: readonly { readonly tMax: number; readonly fy: number; readonly fu: number }[];
-    readonly source: string;
-  }[];
-  readonly electrodes: readonly (Electrode & { readonly source: string })[];
-  readonly sections: readonly (Section & { readonly source: string })[];
 }
 
 export type PrepareResult =

@@ -2,7 +2,7 @@ import type { AngleGrid, Definition, ParameterSetting } from '@shared/contracts/
 import { findKind } from '@shared/engine/index.ts';
 import { anglesOf, valuesOf } from '@shared/engine/sweep/index.ts';
 import { count, upTo } from '../../composables/format.ts';
-import { valueTitle } from '../../composables/value-title.ts';
+import { unitAfter, valueTitle } from '../../composables/value-title.ts';
 
 export interface DefinitionLine {
   readonly name: string;
@@ -37,8 +37,16 @@ export function definitionLines({
     const setting = parameters[name];
     if (!setting) return [];
     const { label = name, symbol = '', unit = '' } = specs.find((spec) => spec.name === name) ?? {};
+    const values = valuesOf(setting);
     return [
-      { name, label, symbol, unit, text: textOf(kind, name, setting), values: valuesOf(setting).length },
+      {
+        name,
+        label,
+        symbol,
+        unit: values.length === 1 ? unitAfter(kind, name, values[0], unit) : unit,
+        text: textOf(kind, name, setting),
+        values: values.length,
+      },
     ];
   });
 }

@@ -1,7 +1,7 @@
 import type { Sheet } from '@shared/contracts/revisions.ts';
 import { findKind } from '@shared/engine/index.ts';
 import { fixed, upTo } from '../../composables/format.ts';
-import { valueTitle } from '../../composables/value-title.ts';
+import { unitAfter, valueTitle } from '../../composables/value-title.ts';
 
 /** Groups of given parameters, in the order in which a detail is built. */
 const GROUPS: readonly (readonly [string, string])[] = [
@@ -36,7 +36,7 @@ export function givenGroups(parameters: Sheet['parameters'], kind: string) {
           name,
           label,
           symbol,
-          unit,
+          unit: unitAfter(kind, name, value, unit),
           value: valueTitle(kind, name, value),
         })),
     }))

@@ -50,6 +50,7 @@ export const boltParameters: readonly ParameterSpec[] = [
     maximum: 120,
     default: 0,
     help: 'Diameter of the round holes. 0: the normal round hole of the basis.',
+    zero: 'normal hole',
   },
   {
     name: 'hole_deformation',
@@ -201,6 +202,7 @@ export const memberParameters: readonly ParameterSpec[] = [
     default: 0,
     when: { parameter: 'brace', is: ['back_to_back', 'star', 'single'] },
     help: 'Heel of the angle to its first line of bolts. 0: the usual one for the leg.',
+    zero: 'usual for the leg',
   },
   {
     name: 'member_end_distance',

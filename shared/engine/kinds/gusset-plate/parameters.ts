@@ -26,6 +26,7 @@ const supportParameters: readonly ParameterSpec[] = [
     maximum: 200,
     default: 0,
     help: 'Flange or wall that the plate is welded to; sets the least weld size. 0: not thicker than the plate.',
+    zero: 'not thicker than the plate',
   },
 ];
 
