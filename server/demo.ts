@@ -10,8 +10,9 @@ import { startJobs } from './jobs/jobs.ts';
 /* Fills an empty catalogue with an invented firm; does nothing where there are people already. */
 
 async function theFirm(app: App): Promise<void> {
-  const { lockVersion, incrementKn: increment, factors } = await readSettings(app);
-  await updateSettings(app, null, lockVersion, { firm: 'Harrow Quay Structural', increment, factors });
+  const { lockVersion, incrementKn: increment, factors, weldSymbols } = await readSettings(app);
+  const firm = 'Harrow Quay Structural';
+  await updateSettings(app, null, lockVersion, { firm, increment, factors, weldSymbols });
 }
 
 async function personWith(app: App, email: string): Promise<SignedInPerson> {

@@ -27,10 +27,14 @@ export const auditVerificationResponse = z.object({
   faults: z.array(z.object({ seq: z.number().int(), message: z.string() })),
 });
 
+/** Which standard the weld symbols on drawings follow. */
+export const weldSymbols = z.enum(['iso-2553', 'aws-a2.4']);
+
 export const settingsResponse = z.object({
   firm: z.string(),
   increment: z.number(),
   factors: z.object({ gammaM0: z.number(), gammaM1: z.number(), gammaM2: z.number() }),
+  weldSymbols,
   lockVersion: z.number().int(),
 });
 export const updateSettingsRequest = z.strictObject({
@@ -41,4 +45,5 @@ export const updateSettingsRequest = z.strictObject({
     gammaM1: z.number().min(0.9).max(2),
     gammaM2: z.number().min(1).max(2),
   }),
+  weldSymbols,
 });

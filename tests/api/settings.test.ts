@@ -14,6 +14,7 @@ const wanted = {
   firm: 'Harrow Quay Structural',
   increment: 0.5,
   factors: { gammaM0: 1, gammaM1: 1.1, gammaM2: 1.3 },
+  weldSymbols: 'aws-a2.4',
 };
 const put = (version: number, body: object) =>
   admin.put('/api/settings').set('If-Match', `"${version}"`).send(body);
@@ -24,6 +25,7 @@ test('settings begin with the recommended partial factors of EN 1993-1-1 6.1 and
     firm: 'The firm',
     increment: 1,
     factors: { gammaM0: 1, gammaM1: 1, gammaM2: 1.25 },
+    weldSymbols: 'iso-2553',
     lockVersion: 0,
   });
 });

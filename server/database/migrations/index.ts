@@ -6,6 +6,7 @@ import { audit, auditHead, settings } from './012-audit.ts';
 import { revisionTriggers } from './015-revision-triggers.ts';
 import { variantTriggers } from './016-variant-triggers.ts';
 import { appendOnly } from './017-append-only.ts';
+import { drawingSymbols } from './018-drawing-symbols.ts';
 import type { Migration } from './migration.ts';
 
 /** In the order in which they are applied. */
@@ -27,4 +28,5 @@ export const migrations: readonly Migration[] = [
   revisionTriggers,
   variantTriggers,
   appendOnly,
+  drawingSymbols,
 ];

@@ -16,6 +16,7 @@ export interface SettingsRow extends Model<
   /** kN to which capacities are rounded down; `increment` is a method of every model. */
   incrementKn: number;
   factors: Factors;
+  weldSymbols: CreationOptional<'iso-2553' | 'aws-a2.4'>;
   lockVersion: CreationOptional<number>;
 }
 
@@ -28,6 +29,7 @@ export const defineSettings = (sequelize: Sequelize) =>
       firm: DataTypes.STRING(120),
       incrementKn: { type: DataTypes.DOUBLE, field: 'increment' },
       factors: DataTypes.JSON,
+      weldSymbols: { type: DataTypes.STRING(12), field: 'weld_symbols' },
       lockVersion: lockVersion(),
     },
     { tableName: 'settings', timestamps: false, version: 'lockVersion' },

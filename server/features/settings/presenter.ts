@@ -6,5 +6,6 @@ export const presentSettings = (row: SettingsRow): z.input<typeof settingsRespon
   firm: row.firm,
   increment: row.incrementKn,
   factors: row.factors,
+  weldSymbols: row.weldSymbols,
   lockVersion: row.lockVersion,
 });

@@ -1,5 +1,6 @@
 import type { DetailGeometry, Point } from '../../types.ts';
 import type { GussetModel } from './model.ts';
+import { sectionView } from './section-view.ts';
 
 /** Length of the brace that is drawn beyond its last row, mm per mm of its width. */
 const STUB = 1.2;
@@ -44,6 +45,7 @@ export function geometryOf(m: GussetModel, theta: number): DetailGeometry {
     axis: { from: place(0, 0), to: place(reach + 20, 0) },
     dimensions: dimensionsOf(m, place),
     thickness: m.thickness,
+    views: [sectionView(m, reach)],
   };
 }
 
