@@ -24,7 +24,11 @@ export function toEngineCatalogue(catalogue: Catalogue): EngineCatalogue {
       source,
     })),
     electrodes: catalogue.electrodes.map(({ name, xu, source }) => ({ name, xu, source })),
-    sections: [...catalogue.angles.map(angleSection), ...catalogue.flats.map(flatSection)],
+    sections: [
+      ...catalogue.angles.map(angleSection),
+      ...catalogue.flats.map(flatSection),
+      ...catalogue.iSections.map(iSection),
+    ],
   });
 }
 
@@ -57,4 +61,19 @@ function flatSection({
   source,
 }: Catalogue['flats'][number]): EngineCatalogue['sections'][number] {
   return { shape: 'flat', name, width: b, thickness: t, area: A, source };
+}
+
+function iSection(record: Catalogue['iSections'][number]): EngineCatalogue['sections'][number] {
+  const { name, h, b, tw, tf, r, A, source } = record;
+  return {
+    shape: 'i',
+    name,
+    depth: h,
+    width: b,
+    webThickness: tw,
+    flangeThickness: tf,
+    rootRadius: r,
+    area: A,
+    source,
+  };
 }

@@ -63,6 +63,7 @@ function describeParameter(spec: ParameterSpec) {
     minimum,
     maximum,
     choices: choices?.map(({ value, label: title, help: meaning }) => ({ value, title, meaning })),
+    shapes: spec.shapes,
     default: spec.default,
     meaning: help,
     zeroMeans: spec.zero,
@@ -78,6 +79,7 @@ function describeType(type: CatalogueType, catalogue: EngineCatalogue) {
       ? [
           { shape: 'angle', fields: numberForms.angle },
           { shape: 'flat', fields: numberForms.flat },
+          { shape: 'i', fields: numberForms.i },
         ]
       : [{ fields: numberForms[type] }];
   return { names: catalogue[lists[type]].map(({ name }) => name), units: 'mm, mm², MPa', forms };

@@ -52,7 +52,7 @@ export interface Electrode {
   readonly xu: number;
 }
 
-/** A rolled angle or a flat bar as the brace. Millimetres, mm2. */
+/** A rolled angle. Millimetres, mm2. */
 export interface AngleSection {
   readonly shape: 'angle';
   readonly name: string;
@@ -72,7 +72,20 @@ export interface FlatSection {
   readonly thickness: number;
   readonly area: number;
 }
-export type Section = AngleSection | FlatSection;
+/** A rolled or welded I or H section. Millimetres, mm2. */
+export interface ISection {
+  readonly shape: 'i';
+  readonly name: string;
+  readonly depth: number;
+  readonly width: number;
+  readonly webThickness: number;
+  readonly flangeThickness: number;
+  /** Between web and flange; 0 in a welded section. */
+  readonly rootRadius: number;
+  readonly area: number;
+}
+export type Section = AngleSection | FlatSection | ISection;
+export type SectionShape = Section['shape'];
 
 /** A catalogue entry is named (`"M20"`, `"S355"`, `"L100x100x10"`) or given by its numbers. */
 export type ParameterValue = number | string | boolean | Readonly<Record<string, number | string>>;
@@ -81,7 +94,7 @@ export type ParameterValues = Readonly<Record<string, ParameterValue>>;
 export type ParameterType =
   'length' | 'number' | 'count' | 'choice' | 'steel' | 'boltSize' | 'boltGrade' | 'electrode' | 'section';
 
-export type ParameterGroup = 'support' | 'plate' | 'weld' | 'bolts' | 'member' | 'method';
+export type ParameterGroup = 'support' | 'plate' | 'weld' | 'bolts' | 'member' | 'beam' | 'method';
 
 /** One line of a kind's schema: everything a form, a file or a script must know of a parameter. */
 export interface ParameterSpec {
@@ -94,6 +107,8 @@ export interface ParameterSpec {
   readonly minimum?: number;
   readonly maximum?: number;
   readonly choices?: readonly { readonly value: string; readonly label: string; readonly help: string }[];
+  /** A section: the shapes that it may have; absent means all. */
+  readonly shapes?: readonly SectionShape[];
   readonly default: ParameterValue;
   readonly help: string;
   /** What 0 stands for where it is no size, e.g. `normal hole of the basis`. */

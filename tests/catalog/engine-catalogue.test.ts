@@ -5,7 +5,9 @@ const engine = toEngineCatalogue(catalogue);
 
 it('hands the engine every size, class and section with the values of its own basis', () => {
   expect(engine.boltSizes).toHaveLength(catalogue.bolts.length);
-  expect(engine.sections).toHaveLength(catalogue.angles.length + catalogue.flats.length);
+  expect(engine.sections).toHaveLength(
+    catalogue.angles.length + catalogue.flats.length + catalogue.iSections.length,
+  );
   // EN 1090-2 d + 2 at M24, CSA S16 22.3.5 d + 2, ANSI/AISC 360 Table J3.3M 27; ISO 898-1 stress areas.
   expect(engine.boltSizes.find(({ name }) => name === 'M24')).toEqual({
     name: 'M24',
@@ -30,6 +32,16 @@ it('hands the engine every size, class and section with the values of its own ba
     width: 120,
     thickness: 12,
     area: 1440,
+  });
+  // EN 10365, from memory: IPE300 is 300 deep, 150 wide, web 7.1, flange 10.7, radius 15, 53.8 cm2.
+  expect(engine.sections.find(({ name }) => name === 'IPE300')).toMatchObject({
+    shape: 'i',
+    depth: 300,
+    width: 150,
+    webThickness: 7.1,
+    flangeThickness: 10.7,
+    rootRadius: 15,
+    area: 5380,
   });
 });
 

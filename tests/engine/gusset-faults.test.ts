@@ -42,6 +42,9 @@ describe('absurd input is a fault of its field', () => {
     ['section', { shape: 'angle', longLeg: 80, shortLeg: 100, thickness: 8 }],
     ['section', { shape: 'angle', longLeg: 100, shortLeg: 100, thickness: 60 }],
     ['section', { shape: 'flat', width: 100, thickness: 10, area: 5000 }],
+    ['section', 'IPE300'],
+    ['section', { shape: 'i', depth: 300, width: 150, webThickness: 7, flangeThickness: 11 }],
+    ['section', { shape: 'i', depth: 300, width: 150, webThickness: 7, flangeThickness: 160 }],
   ])('%s', (field, value) => {
     const found = faults({ ...plain, [field]: value });
     expect(found).toHaveLength(1);
@@ -55,6 +58,10 @@ describe('absurd input is a fault of its field', () => {
     expect(faults({ weld_leg: 1000 })[0]?.message).toContain('from 2 to 40 mm; 1000 was given');
     expect(faults({ plate_steel: 'S35' })[0]?.message).toContain('S355');
     expect(faults({ brace: 'pair' })[0]?.message).toContain('back_to_back, star, single, flat');
+    expect(faults({ section: 'IPE300' })[0]?.message).toBe(
+      'Section: accepted is an angle (shape "angle") or a flat (shape "flat"); "IPE300" is an I section (shape "i")',
+    );
+    expect(faults({ section: 'L100x100x11' })[0]?.message).not.toContain('IPE');
   });
 
   it('unknown names are refused, with the nearest known one', () => {

@@ -4,6 +4,7 @@ import type {
   BoltSize,
   Electrode,
   FlatSection,
+  ISection,
   ParameterType,
   Steel,
 } from '../types.ts';
@@ -38,6 +39,14 @@ export const forms = {
     field('centroidLong', 1, 500, true),
     field('centroidShort', 1, 500, true),
   ],
+  i: [
+    field('depth', 50, 2500),
+    field('width', 20, 1200),
+    field('webThickness', 2, 100),
+    field('flangeThickness', 2, 200),
+    field('rootRadius', 0, 80, true),
+    field('area', 100, 500_000, true),
+  ],
   flat: [field('width', 10, 2000), field('thickness', 2, 200), field('area', 20, 400_000, true)],
 } as const satisfies Record<string, readonly NumberField[]>;
 
@@ -64,7 +73,8 @@ export function readObject(type: ParameterType, given: Readonly<Record<string, u
 function readSection(given: Readonly<Record<string, unknown>>): ObjectRead {
   if (given['shape'] === 'angle') return build(given, forms.angle, ['name', 'shape'], checkAngle);
   if (given['shape'] === 'flat') return build(given, forms.flat, ['name', 'shape'], checkFlat);
-  return { fault: 'a section by numbers needs shape "angle" or "flat"' };
+  if (given['shape'] === 'i') return build(given, forms.i, ['name', 'shape'], checkI);
+  return { fault: 'a section by numbers needs shape "angle", "flat" or "i"' };
 }
 
 type Numbers = Readonly<Record<string, number>>;
@@ -148,4 +158,24 @@ function checkFlat(numbers: Numbers): ObjectRead {
   const { area = width * thickness } = numbers;
   if (area > width * thickness * 1.001) return { fault: 'area exceeds width times thickness' };
   return { value: { shape: 'flat', width, thickness, area } satisfies Omit<FlatSection, 'name'> };
+}
+
+function checkI(numbers: Numbers): ObjectRead {
+  const { depth = 0, width = 0, webThickness = 0, flangeThickness = 0, rootRadius = 0 } = numbers;
+  if (webThickness > width) return { fault: 'webThickness must not exceed width' };
+  const web = depth - 2 * flangeThickness;
+  if (web <= 2 * rootRadius) return { fault: 'flangeThickness and rootRadius leave no web' };
+  const computed = 2 * width * flangeThickness + web * webThickness + 4 * CORNER * rootRadius * rootRadius;
+  const { area = computed } = numbers;
+  if (area > computed * 1.1) return { fault: 'area exceeds what web and flanges can hold' };
+  const value: Omit<ISection, 'name'> = {
+    shape: 'i',
+    depth,
+    width,
+    webThickness,
+    flangeThickness,
+    rootRadius,
+    area,
+  };
+  return { value };
 }

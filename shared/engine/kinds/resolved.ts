@@ -37,8 +37,9 @@ export class Resolved {
   electrode(name: string): Electrode {
     return this.read(name) as Electrode;
   }
-  section(name: string): Section {
-    return this.read(name) as Section;
+  /** A section; `S` is what the schema's `shapes` leave of it. */
+  section<S extends Section = Section>(name: string): S {
+    return this.read(name) as S;
   }
 
   private read(name: string): ResolvedValue {

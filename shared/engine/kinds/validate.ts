@@ -1,5 +1,13 @@
 import { nearestName } from '../numeric/nearest-name.ts';
-import type { EngineCatalogue, FieldFault, ParameterSpec, ParameterType, PartialFactors } from '../types.ts';
+import type {
+  EngineCatalogue,
+  FieldFault,
+  ParameterSpec,
+  ParameterType,
+  PartialFactors,
+  Section,
+  SectionShape,
+} from '../types.ts';
 import { readObject } from './object-values.ts';
 import { Resolved, type ResolvedValue } from './resolved.ts';
 
@@ -85,7 +93,7 @@ function readValue(spec: ParameterSpec, value: unknown, catalogue: EngineCatalog
       return readChoice(spec, value);
     default:
       if (typeof value === 'string') return readName(spec, value, catalogue);
-      if (isRecord(value)) return readNumbers(spec.type, value);
+      if (isRecord(value)) return readNumbers(spec, value);
       return { fault: 'give a catalogue name, or an object of numbers' };
   }
 }
@@ -112,8 +120,10 @@ function readChoice(spec: ParameterSpec, value: unknown): Read {
 function readName(spec: ParameterSpec, name: string, catalogue: EngineCatalogue): Read {
   if ((spec.choices ?? []).some((choice) => choice.value === name)) return { value: { same: true } };
   const found = byName(spec.type, name, catalogue);
+  const misfit = shapeFault(spec, found);
+  if (misfit !== undefined) return misfit;
   if (found !== undefined) return { value: found };
-  const names = catalogueNames(spec.type, catalogue);
+  const names = catalogueNames(spec, catalogue);
   const near = nearestName(name, names);
   const some = [...new Set([...(near === undefined ? [] : [near]), ...names.slice(0, 4)])].join(', ');
   return { fault: `no catalogue entry "${name.slice(0, 40)}"; accepted are for example ${some}` };
@@ -142,7 +152,7 @@ function byName(type: ParameterType, name: string, catalogue: EngineCatalogue): 
   }
 }
 
-function catalogueNames(type: ParameterType, catalogue: EngineCatalogue): string[] {
+function catalogueNames({ type, shapes }: ParameterSpec, catalogue: EngineCatalogue): string[] {
   switch (type) {
     case 'steel':
       return catalogue.steels.map(({ name }) => name);
@@ -153,18 +163,41 @@ function catalogueNames(type: ParameterType, catalogue: EngineCatalogue): string
     case 'electrode':
       return catalogue.electrodes.map(({ name }) => name);
     case 'section':
-      return catalogue.sections.map(({ name }) => name);
+      return catalogue.sections
+        .filter(({ shape }) => shapes === undefined || shapes.includes(shape))
+        .map(({ name }) => name);
     default:
       return [];
   }
 }
 
-function readNumbers(type: ParameterType, given: Readonly<Record<string, unknown>>): Read {
+function readNumbers(spec: ParameterSpec, given: Readonly<Record<string, unknown>>): Read {
+  const { type } = spec;
   const read = readObject(type, given);
   if ('fault' in read) return read;
+  const misfit = type === 'section' ? shapeFault(spec, read.value as Section) : undefined;
+  if (misfit !== undefined) return misfit;
   if (type === 'boltSize') return { value: { size: read.value, catalogued: null } as ResolvedValue };
   if (type === 'steel' || type === 'boltGrade') return { value: { given: read.value } as ResolvedValue };
   return { value: read.value as ResolvedValue };
+}
+
+const shapeNames: Readonly<Record<SectionShape, string>> = {
+  angle: 'an angle (shape "angle")',
+  flat: 'a flat (shape "flat")',
+  i: 'an I section (shape "i")',
+};
+
+/** The fault of a section whose shape the parameter does not take. */
+function shapeFault(
+  { type, shapes }: ParameterSpec,
+  found: ResolvedValue | undefined,
+): { readonly fault: string } | undefined {
+  if (type !== 'section' || shapes === undefined || found === undefined) return undefined;
+  const { name, shape } = found as Section;
+  if (shapes.includes(shape)) return undefined;
+  const accepted = shapes.map((one) => shapeNames[one]).join(' or ');
+  return { fault: `accepted is ${accepted}; "${name}" is ${shapeNames[shape]}` };
 }
 
 function isRecord(value: unknown): value is Readonly<Record<string, unknown>> {

@@ -1,4 +1,4 @@
-import type { EngineCatalogue, ParameterSpec, ParameterValue, Section } from '@shared/engine/types.ts';
+import type { EngineCatalogue, ParameterSpec, ParameterValue, SectionShape } from '@shared/engine/types.ts';
 
 export interface Option {
   readonly value: ParameterValue;
@@ -14,15 +14,19 @@ export function titleOf(value: ParameterValue): string {
     .join(', ');
 }
 
-const shapeOf = (values: Readonly<Record<string, ParameterValue>>): Section['shape'] | null => {
-  if (values.brace === 'flat') return 'flat';
-  return values.brace === undefined ? null : 'angle';
-};
+/** The shapes that the schema takes, narrowed by the brace where there is one. */
+function shapesOf(
+  spec: ParameterSpec,
+  values: Readonly<Record<string, ParameterValue>>,
+): readonly SectionShape[] | null {
+  if (values.brace === undefined) return spec.shapes ?? null;
+  return [values.brace === 'flat' ? 'flat' : 'angle'];
+}
 
 function named(
   spec: ParameterSpec,
   catalogue: EngineCatalogue | null,
-  shape: Section['shape'] | null,
+  shapes: readonly SectionShape[] | null,
 ): readonly { readonly name: string }[] {
   if (!catalogue) return [];
   switch (spec.type) {
@@ -35,7 +39,7 @@ function named(
     case 'electrode':
       return catalogue.electrodes;
     case 'section':
-      return catalogue.sections.filter((section) => shape === null || section.shape === shape);
+      return catalogue.sections.filter((section) => shapes === null || shapes.includes(section.shape));
     default:
       return [];
   }
@@ -53,7 +57,10 @@ export function optionsOf(
   brace: Readonly<Record<string, ParameterValue>> = {},
 ): Option[] {
   const own = (spec.choices ?? []).map(({ value, label, help }) => ({ value, title: label, help }));
-  const listed = named(spec, catalogue, shapeOf(brace)).map(({ name }) => ({ value: name, title: name }));
+  const listed = named(spec, catalogue, shapesOf(spec, brace)).map(({ name }) => ({
+    value: name,
+    title: name,
+  }));
   const options: Option[] = [...own, ...listed];
   for (const value of present)
     if (value !== '' && !options.some((option) => option.value === value))

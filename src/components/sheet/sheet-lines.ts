@@ -10,6 +10,7 @@ const GROUPS: readonly (readonly [string, string])[] = [
   ['weld', 'Weld'],
   ['bolts', 'Bolts'],
   ['member', 'Connected member'],
+  ['beam', 'Supported beam'],
   ['method', 'Method'],
 ];
 

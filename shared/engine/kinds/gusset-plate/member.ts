@@ -1,7 +1,8 @@
 import type { BlockPly } from '../../limit-states/block-shear.ts';
-import type { Section, Steel } from '../../types.ts';
+import type { AngleSection, FlatSection, Steel } from '../../types.ts';
 import { type Resolved, steelAt } from '../resolved.ts';
 
+type Section = AngleSection | FlatSection;
 export type Brace = 'back_to_back' | 'star' | 'single' | 'flat';
 
 /** Heel to the only line of bolts, by leg length, mm: common practice of the United Kingdom (from memory). */
@@ -67,7 +68,7 @@ export interface GussetMember {
 /** Reads the brace from checked parameters. `noSteel` stands for a grade without a value at this thickness. */
 export function memberOf(values: Resolved, deduction: number, noSteel: Steel): GussetMember {
   const brace = values.choice<Brace>('brace');
-  const section = values.section('section');
+  const section = values.section<Section>('section');
   const { thickness } = section;
   const steel = steelAt(values.steel('member_steel'), thickness, null) ?? noSteel;
   const rows = values.number('rows');

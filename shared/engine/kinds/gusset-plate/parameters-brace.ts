@@ -162,6 +162,7 @@ export const memberParameters: readonly ParameterSpec[] = [
     group: 'member',
     type: 'section',
     unit: '',
+    shapes: ['angle', 'flat'],
     default: 'L100x100x10',
     help: 'Angle or flat by catalogue name, or by numbers: { shape: "angle", longLeg, shortLeg, thickness } or { shape: "flat", width, thickness }.',
   },
