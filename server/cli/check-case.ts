@@ -18,8 +18,8 @@ export interface NamedCase {
   readonly kind: DetailKind;
   readonly basis: BasisInfo;
   readonly values: ParameterValues;
-  /** Degrees. */
-  readonly angle: number;
+  /** Degrees; a band where both ends differ. */
+  readonly angles: { readonly from: number; readonly to: number };
   readonly sense: Sense;
   readonly factors: Partial<PartialFactors> | undefined;
 }
@@ -45,10 +45,10 @@ export function checkCase(entry: unknown): CheckedCase {
   const { kind, basis } = namedIn(entry, fault);
   const values = mergedValues(entry, fault);
   if (kind === undefined || basis === undefined) return { faults };
-  const angle = entry.angle as number;
+  const angles = anglesIn(entry.angle) ?? { from: 0, to: 0 };
   const sense = (entry.sense as Sense | undefined) ?? kind.senses[0] ?? 'tension';
   const factors = basis.hasPartialFactors ? (entry.factors as Partial<PartialFactors>) : undefined;
-  return { faults, named: { kind, basis, values, angle, sense, factors } };
+  return { faults, named: { kind, basis, values, angles, sense, factors } };
 }
 
 function namedIn(
@@ -66,15 +66,25 @@ function namedIn(
   if (basis === undefined) {
     fault('basis', given.basis, `Must be one of ${bases.map(({ id }) => id).join(', ')}`);
   }
-  const { angle } = given;
-  if (typeof angle !== 'number' || !(Math.abs(angle) <= 180)) {
-    fault('angle', angle, 'Must be a load angle from -180 to 180 degrees');
+  if (anglesIn(given.angle) === undefined) {
+    const accepted =
+      'Must be a load angle from -180 to 180 degrees, or a band of them as { "from": 0, "to": 15 }';
+    fault('angle', given.angle, accepted);
   }
   const senses: readonly unknown[] = kind?.senses ?? ['tension', 'compression'];
   if (given.sense !== undefined && !senses.includes(given.sense))
     fault('sense', given.sense, `Must be one of ${senses.join(', ')}`);
   checkFactors(given, basis, fault);
   return { kind, basis };
+}
+
+/** One angle, or a band whose ends are in order; undefined for anything else. */
+function anglesIn(given: unknown): NamedCase['angles'] | undefined {
+  const isAngle = (value: unknown): value is number => typeof value === 'number' && Math.abs(value) <= 180;
+  if (isAngle(given)) return { from: given, to: given };
+  if (!isObject(given) || Object.keys(given).some((key) => key !== 'from' && key !== 'to')) return undefined;
+  const { from, to } = given;
+  return isAngle(from) && isAngle(to) && from <= to ? { from, to } : undefined;
 }
 
 type Fault = (field: string, value: unknown, message: string) => void;

@@ -8,6 +8,7 @@ import {
   type Sense,
   toRadians,
 } from '@shared/engine/index.ts';
+import { bandCapacity } from '@shared/engine/sweep/index.ts';
 import { checkCase } from './check-case.ts';
 
 /** Stands beside every capacity that the command line prints. */
@@ -32,7 +33,21 @@ export type Evaluation =
       readonly limitStates: readonly LimitStateResult[];
       readonly caution: string;
     }
-  | { readonly status: 'not-permitted'; readonly rejections: readonly Rejection[] }
+  | {
+      readonly status: 'capacity';
+      /** The lowest capacity anywhere in the band. */
+      readonly capacity_kN: number;
+      readonly governing: Pick<LimitStateInfo, 'id' | 'code' | 'title'>;
+      /** Where in the band it is that low, degrees. */
+      readonly lowestAt: number;
+      readonly caution: string;
+    }
+  | {
+      readonly status: 'not-permitted';
+      readonly rejections: readonly Rejection[];
+      /** Of a band: an angle at which the rules are broken, degrees. */
+      readonly angle?: number;
+    }
   | { readonly status: 'not-covered'; readonly reason: string }
   | { readonly status: 'invalid'; readonly faults: readonly FieldFault[] };
 
@@ -40,11 +55,14 @@ export type Evaluation =
 export function evaluateCase(given: unknown, catalogue: EngineCatalogue): Evaluation {
   const { faults, named } = checkCase(given);
   if (named === undefined) return { status: 'invalid', faults };
-  const { kind, basis, values, angle, sense, factors } = named;
+  const { kind, basis, values, angles, sense, factors } = named;
   const prepared = kind.prepare(values, basis.id, catalogue, factors);
   if (!prepared.ok) return { status: 'invalid', faults: [...faults, ...prepared.faults] };
   if (faults.length > 0) return { status: 'invalid', faults };
-  return evaluate(prepared.detail, angle, sense);
+  const { from, to } = angles;
+  return from === to
+    ? evaluate(prepared.detail, from, sense)
+    : evaluateBand(prepared.detail, from, to, sense);
 }
 
 /** @param angle degrees */
@@ -60,6 +78,20 @@ function evaluate(detail: PreparedDetail, angle: number, sense: Sense): Evaluati
     capacity_kN: kilonewtons(outcome.capacity),
     governing: { id, code, title },
     limitStates: detail.limitStates.map((state, index) => limitStateResult(state, out[index]!)),
+    caution: CAUTION,
+  };
+}
+
+/** @param from, to degrees */
+function evaluateBand(detail: PreparedDetail, from: number, to: number, sense: Sense): Evaluation {
+  const outcome = bandCapacity(detail, sense, toRadians(from), toRadians(to));
+  if (outcome.status !== 'capacity') return outcome;
+  const { id, code, title } = detail.limitStates[outcome.governing]!;
+  return {
+    status: 'capacity',
+    capacity_kN: kilonewtons(outcome.capacity),
+    governing: { id, code, title },
+    lowestAt: outcome.angle,
     caution: CAUTION,
   };
 }

@@ -47,6 +47,21 @@ const flatInTension = {
 };
 
 describe('npm run evaluate', { timeout: MINUTE }, () => {
+  it('takes a band of load angles, and gives the lowest capacity anywhere in it', () => {
+    const at = (angle: unknown) => ({ ...flatInTension, angle });
+    const [band, ...single] = evaluate([at({ from: -20, to: 30 }), at(-20), at(0), at(17.3), at(30)]);
+    expect(band).toMatchObject({ status: 'capacity', caution: expect.stringContaining('engineers') });
+    expect(band.lowestAt).toBeGreaterThanOrEqual(-20);
+    expect(band.lowestAt).toBeLessThanOrEqual(30);
+    const [lowest] = evaluate([at(band.lowestAt)]);
+    expect(band.capacity_kN).toBeCloseTo(lowest.capacity_kN, 6);
+    for (const { capacity_kN } of single) {
+      expect(capacity_kN).toBeGreaterThanOrEqual(band.capacity_kN - 1e-6);
+    }
+    const [wrong] = evaluate([at({ from: 30, to: 10 })]);
+    expect(wrong).toMatchObject({ status: 'invalid', faults: [{ field: 'angle' }] });
+  });
+
   it('answers each case in its order: capacity, broken rule, angle out of reach, faults', () => {
     const results = evaluate([
       flatInTension,
