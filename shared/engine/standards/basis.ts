@@ -163,6 +163,11 @@ export interface Basis {
   bearing(ply: BearingPly): BearingStrength;
   /** Strength of a group in bearing from that of its bolts, N: number, least, greatest, sum, shear of one bolt. */
   bearingGroup(count: number, least: number, most: number, sum: number, boltShear: number, rec: Rec): number;
+  /**
+   * Whether the bolts of an eccentric group all take the least bearing of any, N: greatest bearing of a bolt, shear of
+   * one bolt.
+   */
+  leastBearingThroughout(most: number, boltShear: number): boolean;
   fillet(spec: FilletSpec): FilletStrength;
   /** Design yield stress of a plate section, MPa. */
   yieldStress(fy: number): number;

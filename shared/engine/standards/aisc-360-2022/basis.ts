@@ -112,6 +112,10 @@ class AiscBasis implements Basis {
     return sum;
   }
 
+  leastBearingThroughout(): boolean {
+    return false;
+  }
+
   fillet(spec: FilletSpec): FilletStrength {
     return new AiscFillet(spec, this.format);
   }

@@ -91,6 +91,10 @@ class CsaBasis implements Basis {
     return count * least;
   }
 
+  leastBearingThroughout(): boolean {
+    return false;
+  }
+
   fillet(spec: FilletSpec): FilletStrength {
     return new CsaFillet(spec);
   }

@@ -97,6 +97,11 @@ class EnBasis implements Basis {
     return shared ? sum : count * least;
   }
 
+  /** EN 1993-1-8:2005, 3.7. */
+  leastBearingThroughout(most: number, boltShear: number): boolean {
+    return boltShear < most;
+  }
+
   fillet(spec: FilletSpec): FilletStrength {
     return new EnFillet(spec, this.factors.gammaM2);
   }

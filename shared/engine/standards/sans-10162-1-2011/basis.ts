@@ -102,6 +102,10 @@ class SansBasis implements Basis {
     return count * least;
   }
 
+  leastBearingThroughout(): boolean {
+    return false;
+  }
+
   fillet(spec: FilletSpec): FilletStrength {
     return new SansFillet(spec);
   }

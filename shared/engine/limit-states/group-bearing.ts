@@ -1,0 +1,129 @@
+import type { Basis, BearingStrength, Rec } from '../standards/basis.ts';
+import type { PlyEdges, UprightGroup } from './upright-group.ts';
+
+const METHOD = 'method of this catalogue';
+
+/**
+ * Bearing of each bolt of an upright group on one ply: the project's method. A bolt's force is resolved along the
+ * edges, `sqrt((F_x/R_bx)^2 + (F_y/R_by)^2) <= 1`; each R_b takes the end on the side that the bolt pushes to and the
+ * edges of the other direction. Every strength is worked out beforehand, because no load angle changes it.
+ */
+export class GroupBearing {
+  /** Strength of each bolt, N, pushed away from the support, towards it, up and down. */
+  readonly away: Float64Array;
+  readonly towards: Float64Array;
+  readonly up: Float64Array;
+  readonly down: Float64Array;
+  /** The least of the group in each direction is used throughout. */
+  readonly leastThroughout: boolean;
+
+  /**
+   * @param level, upright strengths across the face and along it, which differ where a basis limits one row
+   * @param boltShear shear of one bolt, all planes, N: some bases compare it with the bearing of the group
+   * @param leastChosen the family takes the least of the group throughout, as handbooks do (errs low)
+   */
+  constructor(
+    private readonly basis: Basis,
+    private readonly level: BearingStrength,
+    private readonly upright: BearingStrength,
+    private readonly group: UprightGroup,
+    private readonly edges: PlyEdges,
+    private readonly boltShear: number,
+    private readonly leastChosen: boolean,
+  ) {
+    this.away = this.strengths((row, column) => this.levelStrength(row, column, 1, null));
+    this.towards = this.strengths((row, column) => this.levelStrength(row, column, -1, null));
+    this.up = this.strengths((row, column) => this.uprightStrength(row, column, 1, null));
+    this.down = this.strengths((row, column) => this.uprightStrength(row, column, -1, null));
+    const all = [this.away, this.towards, this.up, this.down];
+    const most = Math.max(...all.map((strengths) => Math.max(...strengths)));
+    this.leastThroughout = leastChosen || basis.leastBearingThroughout(most, boltShear);
+    if (this.leastThroughout) for (const strengths of all) strengths.fill(Math.min(...strengths));
+  }
+
+  /**
+   * Largest resultant, N, at which no bolt bears more than it can.
+   * @param fx, fy what each bolt puts on the ply for a resultant of 1 N, times `sign`, row by row from the lowest
+   */
+  capacity(fx: Float64Array, fy: Float64Array, sign: number, rec: Rec): number {
+    let most = 0;
+    let worst = 0;
+    for (let bolt = 0; bolt < fx.length; bolt++) {
+      const used = this.squared(bolt, sign * fx[bolt]!, sign * fy[bolt]!);
+      if (used > most) {
+        most = used;
+        worst = bolt;
+      }
+    }
+    const capacity = most > 0 ? 1 / Math.sqrt(most) : Infinity;
+    if (rec !== null) this.record(worst, sign * fx[worst]!, sign * fy[worst]!, capacity, rec);
+    return capacity;
+  }
+
+  private squared(bolt: number, x: number, y: number): number {
+    const ux = x / (x > 0 ? this.away : this.towards)[bolt]!;
+    const uy = y / (y > 0 ? this.up : this.down)[bolt]!;
+    return ux * ux + uy * uy;
+  }
+
+  private strengths(of: (row: number, column: number) => number): Float64Array {
+    const { rows, columns } = this.group;
+    return Float64Array.from({ length: rows * columns }, (_, bolt) =>
+      of(Math.floor(bolt / columns), bolt % columns),
+    );
+  }
+
+  private levelStrength(row: number, column: number, sign: number, rec: Rec): number {
+    const { columns, rows, gauge, pitch } = this.group;
+    const outermost = sign > 0 ? column === columns - 1 : column === 0;
+    const end = outermost ? (sign > 0 ? this.edges.far : this.edges.near) : Infinity;
+    const below = this.edges.below + row * pitch;
+    const above = this.edges.above + (rows - 1 - row) * pitch;
+    const beside = rows > 1 ? pitch : Infinity;
+    return this.level.bolt(end, outermost ? Infinity : gauge, Math.min(below, above), beside, rec);
+  }
+
+  private uprightStrength(row: number, column: number, sign: number, rec: Rec): number {
+    const { columns, rows, gauge, pitch } = this.group;
+    const outermost = sign > 0 ? row === rows - 1 : row === 0;
+    const end = outermost ? (sign > 0 ? this.edges.above : this.edges.below) : Infinity;
+    const near = this.edges.near + column * gauge;
+    const far = this.edges.far + (columns - 1 - column) * gauge;
+    const beside = columns > 1 ? gauge : Infinity;
+    return this.upright.bolt(end, outermost ? Infinity : pitch, Math.min(near, far), beside, rec);
+  }
+
+  private record(bolt: number, x: number, y: number, capacity: number, rec: NonNullable<Rec>): void {
+    const { columns } = this.group;
+    const row = Math.floor(bolt / columns);
+    const column = bolt % columns;
+    const clause = this.basis.clauses.bearing;
+    rec.line('', 'method', '√((F_x/R_bx)² + (F_y/R_by)²) ≤ 1', 'resolved along the edges', '', METHOD);
+    const place = `row ${row + 1} from below, column ${column + 1} from the support`;
+    rec.line('', 'weakest bolt', '', place, '', '');
+    rec.line('F_x', 'across the face, unit resultant', '', x, 'N per N', '');
+    rec.line('F_y', 'along the face, unit resultant', '', y, 'N per N', '');
+    if (x !== 0) {
+      rec.line('', 'R_bx', '', x > 0 ? 'pushed away from the support' : 'pushed towards it', '', '');
+      this.levelStrength(row, column, Math.sign(x), rec);
+    }
+    if (y !== 0) {
+      rec.line('', 'R_by', '', y > 0 ? 'pushed up' : 'pushed down', '', '');
+      this.uprightStrength(row, column, Math.sign(y), rec);
+    }
+    if (this.leastThroughout) this.recordLeast(bolt, x, y, clause, rec);
+    rec.line('R_b', 'weakest bolt, by the resultant', '', capacity, 'N', METHOD);
+  }
+
+  private recordLeast(bolt: number, x: number, y: number, clause: string, rec: NonNullable<Rec>): void {
+    const meaning = this.leastChosen
+      ? 'the least of the group throughout, as the family chooses'
+      : 'shear of a bolt below some bearing: the least of the group throughout';
+    rec.line('', meaning, '', '', '', clause);
+    if (!this.leastChosen) rec.line('F_v', 'shear of one bolt', '', this.boltShear, 'N', clause);
+    const level = (x > 0 ? this.away : this.towards)[bolt]!;
+    const upright = (y > 0 ? this.up : this.down)[bolt]!;
+    if (x !== 0) rec.line('R_bx', 'least of the group', '', level, 'N', clause);
+    if (y !== 0) rec.line('R_by', 'least of the group', '', upright, 'N', clause);
+  }
+}
