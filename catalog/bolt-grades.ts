@@ -13,7 +13,7 @@ const propertyClass = {
 };
 const assembly = {
   source:
-    'ASTM F3125, minimum tensile and yield strength. AISC: ANSI/AISC 360 Table J3.2, Group 120 (A325M), Group 150 (A490M)',
+    'ASTM F3125, minimum tensile and yield strength. AISC: ANSI/AISC 360 Table J3.2, Group 120 (A325M, A325), Group 150 (A490M, A490), A307',
   edition: 'ASTM F3125/F3125M-19; ANSI/AISC 360-22',
   evidence:
     'tensile strength read in published handbook notes; yield from memory; table in ksi read, its MPa from memory',
@@ -76,30 +76,63 @@ function fromClass([name, fyb, fub, minimum]: Row): BoltGradeRecord {
   };
 }
 
-function fromAssembly(
-  name: string,
-  fyb: number,
-  fub: number,
-  group: Omit<AiscStressBand, 'dMax'>,
-): BoltGradeRecord {
+interface AssemblyRow {
+  readonly name: string;
+  /** Smallest and largest diameter, mm. */
+  readonly sizes: readonly [number, number];
+  readonly fyb: number;
+  readonly fub: number;
+  readonly group: Omit<AiscStressBand, 'dMax'>;
+}
+
+function fromAssembly({ name, sizes, fyb, fub, group }: AssemblyRow): BoltGradeRecord {
+  const [dMin, dMax] = sizes;
   return {
     name,
     family: 'structural-assembly',
-    dMin: 12,
-    dMax: 36,
+    dMin,
+    dMax,
     nominal: null,
-    minimum: [{ dMax: 36, fub }],
+    minimum: [{ dMax, fub }],
     fyb,
-    aisc: [{ dMax: 36, ...group }],
+    aisc: [{ dMax, ...group }],
     practices: ['csa', 'aisc'],
     ...assembly,
     missing: [{ field: 'nominal', reason: 'EN 1993-1-8 Table 3.1 does not have this grade' }],
   };
 }
 
-/** ISO property classes and metric ASTM structural bolt grades. MPa. */
+/** Strengths of inch bolts, printed in ksi. */
+const ksi = (value: number): number => Math.round(value * 68.94757) / 10;
+const inches = [12.7, 38.1] as const;
+const inchGrades: readonly AssemblyRow[] = [
+  {
+    name: 'A325',
+    sizes: inches,
+    fyb: ksi(92),
+    fub: ksi(120),
+    group: { fnt: ksi(90), fnvN: ksi(54), fnvX: ksi(68) },
+  },
+  {
+    name: 'A490',
+    sizes: inches,
+    fyb: ksi(130),
+    fub: ksi(150),
+    group: { fnt: ksi(113), fnvN: ksi(68), fnvX: ksi(84) },
+  },
+  {
+    name: 'A307',
+    sizes: inches,
+    fyb: ksi(36),
+    fub: ksi(60),
+    group: { fnt: ksi(45), fnvN: ksi(27), fnvX: ksi(27) },
+  },
+];
+
+/** ISO property classes, and ASTM structural bolt grades metric and in inches. MPa. */
 export const boltGrades: readonly BoltGradeRecord[] = [
   ...rows.map(fromClass),
-  fromAssembly('A325M', 660, 830, group120),
-  fromAssembly('A490M', 940, 1040, group150),
+  fromAssembly({ name: 'A325M', sizes: [12, 36], fyb: 660, fub: 830, group: group120 }),
+  fromAssembly({ name: 'A490M', sizes: [12, 36], fyb: 940, fub: 1040, group: group150 }),
+  ...inchGrades.map(fromAssembly),
 ];

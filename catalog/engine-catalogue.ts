@@ -4,12 +4,11 @@ import type { BoltSizeRecord, Catalogue } from './types.ts';
 
 /**
  * The part of the reference data that a kind computes with, in the engine's own shape.
- * A bolt size without the holes of EN and SANS is left out. What another standard does not list is null or empty,
- * and its bases refuse it by name.
+ * What a standard does not list is null or empty: its bases refuse it by name, or use their rule for the diameter.
  */
 export function toEngineCatalogue(catalogue: Catalogue): EngineCatalogue {
   return deepFreeze({
-    boltSizes: catalogue.bolts.flatMap(boltSize),
+    boltSizes: catalogue.bolts.map(boltSize),
     boltGrades: catalogue.boltGrades.map(({ name, fyb, nominal, minimum, aisc, source }) => ({
       name,
       fyb,
@@ -32,9 +31,8 @@ export function toEngineCatalogue(catalogue: Catalogue): EngineCatalogue {
   });
 }
 
-function boltSize({ name, d, As, holes }: BoltSizeRecord): EngineCatalogue['boltSizes'] {
-  const { en, sans, csa, aisc } = holes.normal;
-  return en === null || sans === null ? [] : [{ name, d, stressArea: As, hole: { en, sans, csa, aisc } }];
+function boltSize({ name, d, As, holes }: BoltSizeRecord): EngineCatalogue['boltSizes'][number] {
+  return { name, d, stressArea: As, hole: holes.normal };
 }
 
 function angleSection(record: Catalogue['angles'][number]): EngineCatalogue['sections'][number] {

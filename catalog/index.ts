@@ -6,10 +6,12 @@ import { equalAngles } from './angles/equal.ts';
 import { unequalAngles } from './angles/unequal.ts';
 import { backmarks } from './backmarks.ts';
 import { boltGrades } from './bolt-grades.ts';
-import { bolts } from './bolts.ts';
+import { inchBolts } from './bolts/inch.ts';
+import { metricBolts } from './bolts/metric.ts';
 import { electrodes } from './electrodes.ts';
 import { flats } from './flats.ts';
 import { deepFreeze } from './freeze.ts';
+import { americanISections } from './i-sections/american.ts';
 import { britishISections } from './i-sections/british.ts';
 import { europeanISections } from './i-sections/european.ts';
 import { en10025Steels } from './steels/en-10025.ts';
@@ -31,13 +33,13 @@ export { toEngineCatalogue } from './engine-catalogue.ts';
 export type * from './types.ts';
 
 export const catalogue: Catalogue = deepFreeze({
-  bolts,
+  bolts: [...metricBolts, ...inchBolts],
   boltGrades,
   steels: [...en10025Steels, ...sans1431Steels, ...northAmericanSteels],
   electrodes,
   angles: [...equalAngles, ...unequalAngles],
   flats,
-  iSections: [...europeanISections, ...britishISections],
+  iSections: [...europeanISections, ...britishISections, ...americanISections],
   backmarks,
   tables,
 });
@@ -47,7 +49,7 @@ function finder<T extends { readonly name: string }>(records: readonly T[]): (na
   return (name) => byName.get(name);
 }
 
-/** Bolt size by name, e.g. `M20`; undefined when unknown. */
+/** Bolt size by name, e.g. `M20` or `3/4 in`; undefined when unknown. */
 export const findBolt: (name: string) => BoltSizeRecord | undefined = finder(catalogue.bolts);
 
 /** Bolt grade by name, e.g. `8.8`; undefined when unknown. */

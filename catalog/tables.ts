@@ -12,7 +12,7 @@ const leg = { oneLine: 'mm', twoLines: 'mm' };
 /** Title of each table and the unit of every number in it; a list's items share the path of the list. */
 export const tables: Readonly<Record<TableName, TableDescription>> = {
   bolts: {
-    title: 'Bolts M12 to M36',
+    title: 'Bolts M12 to M36 and 1/2 in to 1-1/2 in',
     units: {
       ...{ d: 'mm', pitch: 'mm', As: 'mm2', headAcrossFlats: 'mm', headAcrossCorners: 'mm' },
       ...under('holes.normal', holes),

@@ -32,7 +32,7 @@ export type HoleDiameters = Readonly<Record<Practice, number | null>>;
 export interface BoltSizeRecord extends CatalogueRecord {
   readonly d: number;
   readonly pitch: number;
-  /** Tensile stress area as printed in ISO 898-1, mm2. */
+  /** Tensile stress area as printed in ISO 898-1, or in ASME B1.1 for inch sizes, mm2. */
   readonly As: number;
   readonly headAcrossFlats: number;
   /** Smallest width across corners, product grade B. */
@@ -141,7 +141,7 @@ export interface FlatRecord extends CatalogueRecord {
   readonly mass: number;
 }
 
-export type ISectionSeries = 'IPE' | 'IPEA' | 'HEA' | 'HEB' | 'UB' | 'UC';
+export type ISectionSeries = 'IPE' | 'IPEA' | 'HEA' | 'HEB' | 'UB' | 'UC' | 'W';
 
 export interface ISectionRecord extends CatalogueRecord {
   readonly series: ISectionSeries;

@@ -5,8 +5,8 @@ export interface EngineCatalogue {
   readonly boltSizes: readonly (BoltSize & {
     /** Normal round holes; null where the standard lists none for this size. */
     readonly hole: {
-      readonly en: number;
-      readonly sans: number;
+      readonly en: number | null;
+      readonly sans: number | null;
       readonly csa: number | null;
       readonly aisc: number | null;
     };

@@ -15,6 +15,13 @@ it('hands the engine every size, class and section with the values of its own ba
     stressArea: 353,
     hole: { en: 26, sans: 26, csa: 26, aisc: 27 },
   });
+  // 3/4 in: ANSI/AISC 360 Table J3.3 13/16 in, CSA S16 22.3.5 d + 2 mm; ASME B1.1 0.334 in2. EN has no inch sizes.
+  expect(engine.boltSizes.find(({ name }) => name === '3/4 in')).toEqual({
+    name: '3/4 in',
+    d: 19.05,
+    stressArea: 215.5,
+    hole: { en: null, sans: null, csa: 21.05, aisc: 20.64 },
+  });
   // EN 10056-1, from memory: L150x75x10 has r1 12 and 21.7 cm2.
   expect(engine.sections.find(({ name }) => name === 'L150x75x10')).toMatchObject({
     shape: 'angle',
@@ -55,7 +62,13 @@ it('keeps the nominal and the minimum bolt strength apart', () => {
 it('has no nominal strength for the grades that EN does not have', () => {
   const names = engine.boltGrades.filter(({ nominal }) => nominal !== null).map(({ name }) => name);
   expect(names).toEqual(['4.6', '4.8', '5.6', '5.8', '6.8', '8.8', '10.9']);
-  expect(engine.boltGrades.slice(7).map(({ name }) => name)).toEqual(['A325M', 'A490M']);
+  expect(engine.boltGrades.slice(7).map(({ name }) => name)).toEqual([
+    'A325M',
+    'A490M',
+    'A325',
+    'A490',
+    'A307',
+  ]);
 });
 
 it('gives a class the lower of Table J3.2 of AISC 360 for its group and for a threaded part', () => {

@@ -89,4 +89,17 @@ describe('I sections', () => {
       expect(Math.abs(mass - Number(name.split('x').at(-1))), name).toBeLessThanOrEqual(0.6);
     }
   });
+
+  it('weighs what a W shape carries in its names, to a kilogram or 1 %', () => {
+    const american = catalogue.iSections.filter(({ series }) => series === 'W');
+    expect(american.length).toBeGreaterThan(40);
+    for (const { name, mass, h } of american) {
+      const [depth, weight] = name.slice(1).split('x').map(Number) as [number, number];
+      // ASTM A6: pounds a foot in the US name, kilograms a metre in the metric one.
+      const inInches = depth < 50;
+      const named = inInches ? weight * 1.48816 : weight;
+      expect(Math.abs(mass - named), name).toBeLessThanOrEqual(Math.max(1, 0.01 * named));
+      expect(off(h, inInches ? depth * 25.4 : depth), name).toBeLessThanOrEqual(0.06);
+    }
+  });
 });

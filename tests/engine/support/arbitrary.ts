@@ -31,18 +31,20 @@ const likely: Readonly<Record<string, readonly [number, number]>> = {
 };
 
 /** Names that every basis has values for. */
-function names(type: ParameterSpec['type']): string[] {
+function names({ type, shapes }: ParameterSpec): string[] {
   switch (type) {
     case 'steel':
       return catalogue.steels.map(({ name }) => name);
     case 'boltSize':
-      return catalogue.boltSizes.filter(({ hole }) => hole.aisc !== null).map(({ name }) => name);
+      return catalogue.boltSizes.filter(({ hole }) => hole.aisc !== null && hole.csa !== null).map(({ name }) => name);
     case 'boltGrade':
       return catalogue.boltGrades.filter(({ nominal }) => nominal !== null).map(({ name }) => name);
     case 'electrode':
       return catalogue.electrodes.map(({ name }) => name);
     default:
-      return catalogue.sections.map(({ name }) => name);
+      return catalogue.sections
+        .filter(({ shape }) => shapes === undefined || shapes.includes(shape))
+        .map(({ name }) => name);
   }
 }
 
@@ -53,7 +55,7 @@ function arbitraryValue(spec: ParameterSpec, wide: boolean): fc.Arbitrary<Parame
     return fc.double({ min: minimum, max: maximum, noNaN: true });
   }
   if (spec.type === 'choice') return fc.constantFrom(...(spec.choices ?? []).map(({ value }) => value));
-  return fc.constantFrom(...names(spec.type));
+  return fc.constantFrom(...names(spec));
 }
 
 /** Parameter values that pass the schema; `wide` draws from the whole of every range. */

@@ -1,23 +1,32 @@
 import type { Detailing } from '../basis.ts';
 
-/** Bolt diameter and least edge distance, mm. */
-const tableJ34M: readonly (readonly [d: number, edge: number])[] = [
+const INCH = 25.4;
+
+/** Bolt diameter and least edge distance, mm: Table J3.4M, and between its rows those of Table J3.4 in inches. */
+const tableJ34: readonly (readonly [d: number, edge: number])[] = [
   [12, 18],
+  [0.5 * INCH, 0.75 * INCH],
+  [0.625 * INCH, 0.875 * INCH],
   [16, 22],
+  [0.75 * INCH, INCH],
   [20, 26],
   [22, 28],
+  [0.875 * INCH, 1.125 * INCH],
   [24, 30],
+  [INCH, 1.25 * INCH],
   [27, 34],
+  [1.125 * INCH, 1.5 * INCH],
   [30, 38],
+  [1.25 * INCH, 1.625 * INCH],
   [36, 46],
 ];
 
 /**
- * Least distance from the centre of a standard hole to any edge, mm: the row of ANSI/AISC 360-22 Table J3.4M for this
- * size or the next larger one; beyond M36 1.25 d.
+ * Least distance from the centre of a standard hole to any edge, mm: the row of ANSI/AISC 360-22 Table J3.4M or
+ * J3.4 for this size or the next larger one; beyond M36 1.25 d.
  */
 export function leastEdgeDistance(d: number): number {
-  const row = tableJ34M.find(([size]) => size >= d);
+  const row = tableJ34.find(([size]) => size >= d);
   return row === undefined ? 1.25 * d : row[1];
 }
 
@@ -31,6 +40,11 @@ export function leastFilletLeg(thinner: number): number {
 /** Clearance of a standard hole, mm: 2 below M24, 3 from M24 up. ANSI/AISC 360-22, Table J3.3M. */
 export function standardClearance(d: number): number {
   return d < 24 ? 2 : 3;
+}
+
+/** Greatest standard hole, mm: Table J3.3M, and 1/8 in over an inch bolt from 1 in up. ANSI/AISC 360-22, Table J3.3. */
+export function greatestHole(d: number): number {
+  return d < 24 ? d + 2 : d + INCH / 8;
 }
 
 /** Least distance between centres, mm: `2 2/3 d`, and d clear between the holes. ANSI/AISC 360-22, J3.4. */
@@ -57,5 +71,5 @@ export const detailing: Detailing = {
   leastWeldLeg: (_thicker, thinner) => leastFilletLeg(thinner),
   leastWeldThroat: () => 0,
   leastWeldLength: (leg) => 4 * leg,
-  greatestHole: (d) => d + standardClearance(d),
+  greatestHole,
 };

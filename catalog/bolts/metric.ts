@@ -1,4 +1,4 @@
-import type { BoltSizeRecord, MissingValue } from './types.ts';
+import type { BoltSizeRecord, MissingValue } from '../types.ts';
 
 /** d, pitch, A_s, across flats, across corners, holes normal [en sans csa aisc], holes oversize [en sans csa aisc]. */
 type Holes = readonly [number | null, number | null, number | null, number | null];
@@ -54,4 +54,4 @@ function byPractice([en, sans, csa, aisc]: Holes) {
 }
 
 /** Metric bolts M12 to M36. mm, mm2. */
-export const bolts: readonly BoltSizeRecord[] = rows.map(record);
+export const metricBolts: readonly BoltSizeRecord[] = rows.map(record);
