@@ -12,6 +12,14 @@ import {
   type Sense,
   type SheetSection,
 } from '../../types.ts';
+import {
+  governing,
+  recordLimitStates,
+  recordNotCovered,
+  recordNotes,
+  recordRejections,
+  recordResult,
+} from '../detail-sheet.ts';
 import { Rejections } from '../rules.ts';
 import { geometryOf } from './geometry.ts';
 import { recordGiven } from './given.ts';
@@ -25,9 +33,6 @@ import { GussetView } from './view.ts';
 
 /** The steepest load angle either way, radians. */
 export const STEEPEST = (80 * Math.PI) / 180;
-
-/** Capacities closer than this share of each other are a tie, which goes to the first listed. */
-const TIE = 1e-9;
 
 /** A gusset plate with everything that the load angle does not change worked out. */
 export class GussetDetail implements PreparedDetail {
@@ -94,22 +99,17 @@ export class GussetDetail implements PreparedDetail {
     const rec = new SheetRecorder();
     const outcome = this.outcome(theta, sense);
     if (outcome.status === 'not-covered') {
-      rec.section('result', 'Result');
-      rec.line('', 'not covered', '', outcome.reason, '', '');
+      recordNotCovered(outcome.reason, rec);
       return rec.sections;
     }
     this.view.turn(theta, sense === 'tension');
     recordGiven(this.model, this.view, theta, rec);
     if (outcome.status === 'capacity') {
       this.recordLimitStates(rec);
-      this.recordResult(outcome.governing, outcome.capacity, rec);
-    } else {
-      rec.section('rules', 'Rules that the detail breaks');
-      for (const { title, message, clause } of outcome.rejections) {
-        rec.line('', title, '', message, '', clause);
-      }
-    }
-    this.recordNotes(rec);
+      const { info } = this.model.basis;
+      recordResult(this.limitStates[outcome.governing], info.resultLabel, outcome.capacity, rec);
+    } else recordRejections(outcome.rejections, rec);
+    recordNotes(this.model.fitWaived ? [waivedNote, ...notes] : notes, this.model.basis, rec);
     return rec.sections;
   }
 
@@ -167,38 +167,6 @@ export class GussetDetail implements PreparedDetail {
       (r) => limits.memberNet(model, tension, r),
       (r) => limits.memberGross(model, r),
     ];
-    this.limitStates.forEach(({ id, code, title, clause }, index) => {
-      rec.section(id, `${code}  ${title}`);
-      const capacity = work[index]?.(rec) ?? Infinity;
-      if (capacity === Infinity) rec.line('R', 'capacity', '', 'does not apply', '', clause);
-      else rec.line('R', 'capacity', '', capacity, 'N', clause);
-    });
+    recordLimitStates(this.limitStates, work, rec);
   }
-
-  private recordResult(index: number, capacity: number, rec: NonNullable<Rec>): void {
-    const state = this.limitStates[index];
-    rec.section('result', 'Result');
-    rec.line('', 'governing limit state', '', `${state?.code}  ${state?.title}`, '', state?.clause ?? '');
-    const label = this.model.basis.info.resultLabel;
-    rec.line('R', label, 'the least of the above', capacity, 'N', '');
-  }
-
-  private recordNotes(rec: NonNullable<Rec>): void {
-    rec.section('notes', 'Notes');
-    const lines = this.model.fitWaived ? [waivedNote, ...notes] : notes;
-    for (const note of lines) rec.line('', note, '', '', '', '');
-    for (const note of this.model.basis.info.notes) rec.line('', note.text, '', '', '', note.clause);
-  }
-}
-
-function governing(out: Float64Array, count: number): number {
-  let index = 0;
-  let least = out[0]!;
-  for (let state = 1; state < count; state++) {
-    if (out[state]! < least * (1 - TIE)) {
-      least = out[state]!;
-      index = state;
-    }
-  }
-  return index;
 }

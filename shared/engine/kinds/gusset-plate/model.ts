@@ -6,18 +6,14 @@ import type {
   BearingStrength,
   BoltInShear,
   EdgeFinish,
-  FilletPart,
   FilletStrength,
   HoleMaking,
 } from '../../standards/basis.ts';
-import type { BoltGrade, Electrode, Steel } from '../../types.ts';
-import { type Resolved, steelAt } from '../resolved.ts';
+import type { Electrode, Steel } from '../../types.ts';
+import { boltOf, noGrade, normalHole, noSteel, plateOf, weldedParts } from '../parts.ts';
+import type { Resolved } from '../resolved.ts';
 import { TOLERANCE } from '../rules.ts';
 import { memberOf, type GussetMember } from './member.ts';
-
-/** Stands for a strength that the catalogue does not have; the rule that says so rejects the detail. */
-const noSteel: Steel = { name: 'none', fy: 1, fu: 1 };
-const noGrade: BoltGrade = { name: 'none', fyb: 1, fub: 1 };
 
 /** Everything about one gusset plate that does not change with the load angle. N, mm, MPa. */
 export interface GussetModel {
@@ -72,7 +68,8 @@ export interface GussetModel {
 export function buildModel(values: Resolved, basis: Basis): GussetModel {
   const plate = plateOf(values);
   const layout = layoutOf(values);
-  const bolt = boltOf(values, basis, layout.lastRow - layout.firstRow);
+  const planes = values.choice('brace') === 'back_to_back' ? 2 : 1;
+  const bolt = boltOf(values, basis, planes, layout.lastRow - layout.firstRow);
   const deduction = bolt.holeDiameter + basis.holeAllowance(values.choice<HoleMaking>('hole_making'));
   const member = memberOf(values, deduction, noSteel);
   const fillet = basis.fillet({
@@ -135,24 +132,6 @@ export function buildModel(values: Resolved, basis: Basis): GussetModel {
   };
 }
 
-function plateOf(values: Resolved) {
-  const thickness = values.number('plate_thickness');
-  const plate = steelAt(values.steel('plate_steel'), thickness, null) ?? noSteel;
-  const supportThickness = values.number('support_thickness');
-  const at = supportThickness === 0 ? thickness : supportThickness;
-  const support = steelAt(values.steel('support_steel'), at, plate) ?? noSteel;
-  return { thickness, plate, support, supportThickness };
-}
-
-/** The plate between its two fillets, and the support under each. */
-function weldedParts(plate: ReturnType<typeof plateOf>): readonly FilletPart[] {
-  const { thickness, supportThickness } = plate;
-  return [
-    { ...plate.plate, thickness, fillets: 2 },
-    { ...plate.support, thickness: supportThickness <= TOLERANCE ? thickness : supportThickness, fillets: 1 },
-  ];
-}
-
 function layoutOf(values: Resolved) {
   const rows = values.number('rows');
   const lines = values.number('lines');
@@ -168,26 +147,5 @@ function layoutOf(values: Resolved) {
     firstRow,
     lastRow: firstRow + (rows - 1) * pitch,
     spread: spreadHalfWidth(rows, pitch, lines, gauge),
-  };
-}
-
-function normalHole(values: Resolved, basis: Basis): number | null {
-  const { size, catalogued } = values.size('bolt_size');
-  return basis.normalHole(size, catalogued);
-}
-
-function boltOf(values: Resolved, basis: Basis, jointLength: number): BoltInShear {
-  const { size } = values.size('bolt_size');
-  const choice = values.grade('bolt_grade');
-  const grade = 'given' in choice ? choice.given : basis.grade(choice.catalogued, size.d);
-  const hole = values.number('hole_diameter');
-  return {
-    size,
-    grade: grade ?? noGrade,
-    // A size without a hole of its own is a fault unless the hole is given.
-    holeDiameter: hole === 0 ? (normalHole(values, basis) ?? size.d) : hole,
-    planes: values.choice('brace') === 'back_to_back' ? 2 : 1,
-    threadsInPlane: values.choice('threads') === 'in_plane',
-    jointLength,
   };
 }

@@ -1,34 +1,9 @@
 import type { ParameterSpec } from '../../types.ts';
+import { edgeFinish, holeMaking, plateSteel, supportSteel, supportThickness } from '../schema/plate.ts';
+import { electrode, electrodeMatch, weldEnds, weldLeg, weldMethod } from '../schema/weld.ts';
 import { boltParameters, memberParameters } from './parameters-brace.ts';
 
-const supportParameters: readonly ParameterSpec[] = [
-  {
-    name: 'support_steel',
-    label: 'Steel of the support',
-    symbol: '',
-    group: 'support',
-    type: 'steel',
-    unit: '',
-    choices: [
-      { value: 'same', label: 'Same as the plate', help: 'The support has the strength of the plate.' },
-    ],
-    default: 'same',
-    help: 'The weld takes the weaker of plate and support.',
-  },
-  {
-    name: 'support_thickness',
-    label: 'Thickness of the support',
-    symbol: 't_s',
-    group: 'support',
-    type: 'length',
-    unit: 'mm',
-    minimum: 0,
-    maximum: 200,
-    default: 0,
-    help: 'Flange or wall that the plate is welded to; sets the least weld size. 0: not thicker than the plate.',
-    zero: 'not thicker than the plate',
-  },
-];
+const supportParameters: readonly ParameterSpec[] = [supportSteel, supportThickness];
 
 const plateParameters: readonly ParameterSpec[] = [
   {
@@ -43,16 +18,7 @@ const plateParameters: readonly ParameterSpec[] = [
     default: 12,
     help: 'Thickness of the gusset plate.',
   },
-  {
-    name: 'plate_steel',
-    label: 'Plate steel',
-    symbol: '',
-    group: 'plate',
-    type: 'steel',
-    unit: '',
-    default: 'S355',
-    help: 'Grade by catalogue name, read at the plate thickness, or { fy, fu } in MPa.',
-  },
+  plateSteel,
   {
     name: 'outline',
     label: 'Outline',
@@ -114,36 +80,8 @@ const plateParameters: readonly ParameterSpec[] = [
     when: { parameter: 'outline', is: ['tapered'] },
     help: 'Outer line of bolts to the corner of the cut end, each side, across the brace.',
   },
-  {
-    name: 'edge_finish',
-    label: 'Plate edges',
-    symbol: '',
-    group: 'plate',
-    type: 'choice',
-    unit: '',
-    choices: [
-      { value: 'sheared', label: 'Sheared', help: 'The larger edge distances.' },
-      { value: 'rolled', label: 'Rolled, sawn or gas cut', help: 'The smaller edge distances.' },
-    ],
-    default: 'sheared',
-    bases: ['sans-10162-1-2011', 'csa-s16-2019'],
-    help: 'How the edges of the gusset and the end of the brace are made.',
-  },
-  {
-    name: 'hole_making',
-    label: 'Holes',
-    symbol: '',
-    group: 'plate',
-    type: 'choice',
-    unit: '',
-    choices: [
-      { value: 'punched', label: 'Punched', help: '2 mm more is deducted from net areas.' },
-      { value: 'drilled', label: 'Drilled', help: 'The hole itself is deducted.' },
-    ],
-    default: 'punched',
-    bases: ['sans-10162-1-2011', 'csa-s16-2019'],
-    help: 'How holes are made in the gusset and the brace.',
-  },
+  edgeFinish,
+  holeMaking,
 ];
 
 const weldParameters: readonly ParameterSpec[] = [
@@ -159,44 +97,9 @@ const weldParameters: readonly ParameterSpec[] = [
     default: 320,
     help: 'Height of the plate along the face; welded on both sides over the whole of it.',
   },
-  {
-    name: 'weld_leg',
-    label: 'Weld leg',
-    symbol: 'z',
-    group: 'weld',
-    type: 'length',
-    unit: 'mm',
-    minimum: 2,
-    maximum: 40,
-    default: 8,
-    help: 'Leg of each fillet; the throat is z/√2.',
-  },
-  {
-    name: 'electrode',
-    label: 'Electrode',
-    symbol: 'X_u',
-    group: 'weld',
-    type: 'electrode',
-    unit: '',
-    default: 'E70XX',
-    bases: ['sans-10162-1-2011', 'csa-s16-2019', 'aisc-360-2022-lrfd', 'aisc-360-2022-asd'],
-    help: 'By catalogue name, or { xu } in MPa.',
-  },
-  {
-    name: 'electrode_match',
-    label: 'Base metal at the weld',
-    symbol: '',
-    group: 'weld',
-    type: 'choice',
-    unit: '',
-    choices: [
-      { value: 'over_matched', label: 'Checked', help: 'As for an electrode stronger than the parts.' },
-      { value: 'matching', label: 'Matching electrode', help: 'The weld metal alone is checked.' },
-    ],
-    default: 'over_matched',
-    bases: ['csa-s16-2019'],
-    help: 'CSA S16 asks for the base metal with over-matched electrodes only.',
-  },
+  weldLeg,
+  electrode,
+  electrodeMatch,
   {
     name: 'work_line_offset',
     label: 'Offset of the work line',
@@ -209,39 +112,8 @@ const weldParameters: readonly ParameterSpec[] = [
     default: 0,
     help: 'From the middle of the weld to where the line of the brace meets the face, upwards positive.',
   },
-  {
-    name: 'weld_ends',
-    label: 'Ends of the weld',
-    symbol: '',
-    group: 'weld',
-    type: 'choice',
-    unit: '',
-    choices: [
-      { value: 'full', label: 'Full size to the ends', help: 'The whole length counts.' },
-      {
-        value: 'deducted',
-        label: 'Run-out deducted',
-        help: 'EN: one throat at each end; the others: one leg at each end.',
-      },
-    ],
-    default: 'full',
-    help: 'Whether the fillets keep their size up to the ends.',
-  },
-  {
-    name: 'weld_method',
-    label: 'Weld method',
-    symbol: '',
-    group: 'method',
-    type: 'choice',
-    unit: '',
-    choices: [
-      { value: 'directional', label: 'Directional', help: 'EN 1993-1-8 4.5.3.2.' },
-      { value: 'simplified', label: 'Simplified', help: 'EN 1993-1-8 4.5.3.3, lower.' },
-    ],
-    default: 'directional',
-    bases: ['en-1993-1-8-2005'],
-    help: 'Which of the two methods of EN 1993-1-8 sets the strength of the fillets.',
-  },
+  weldEnds,
+  weldMethod,
 ];
 
 /** The schema of the gusset plate, in the order of a form. */
