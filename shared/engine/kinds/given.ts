@@ -27,7 +27,7 @@ export function recordParameters(
 }
 
 /** Whether a basis and the other choices use a parameter. */
-function isUsed({ bases, when }: ParameterSpec, values: Resolved, basis: Basis): boolean {
+export function isUsed({ bases, when }: ParameterSpec, values: Resolved, basis: Basis): boolean {
   if (bases !== undefined && !bases.includes(basis.info.id)) return false;
   return when === undefined || when.is.includes(values.text(when.parameter));
 }

@@ -1,9 +1,11 @@
 import type { DetailKind, KindId } from '../types.ts';
+import { finPlate } from './fin-plate/index.ts';
 import { gussetPlate } from './gusset-plate/index.ts';
 
 /** Every kind of detail. A new one is a folder and a line here. */
 const registry: Readonly<Record<KindId, DetailKind>> = {
   'gusset-plate': gussetPlate,
+  'fin-plate': finPlate,
 };
 
 export const kinds: readonly DetailKind[] = Object.values(registry);

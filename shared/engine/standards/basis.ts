@@ -34,7 +34,9 @@ export type ClauseKey =
   | 'tensionSection'
   | 'compression'
   | 'memberNet'
-  | 'memberGross';
+  | 'memberGross'
+  | 'shearSection'
+  | 'webTension';
 
 /** One bolt in shear. mm, mm2, MPa. */
 export interface BoltInShear {
@@ -188,6 +190,10 @@ export interface Basis {
   tearOut(agv: number, fy: number, fu: number, rec: Rec): number;
   tensionYield(area: number, fy: number, rec: Rec): number;
   tensionRupture(net: number, fu: number, rec: Rec): number;
+  /** Gross section of a plate or a web in shear, N. mm2, MPa. */
+  shearYield(agv: number, fy: number, rec: Rec): number;
+  /** Net section of a plate or a web in shear, N. mm2, MPa. */
+  shearRupture(anv: number, fu: number, rec: Rec): number;
   /** Flexural buckling of a plate strip; `slenderness` is K L / r. */
   compression(area: number, fy: number, slenderness: number, rec: Rec): number;
   angleNetSection(angle: AngleByOneLeg, rec: Rec): number;

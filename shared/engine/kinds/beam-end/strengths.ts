@@ -55,3 +55,26 @@ export function webTension(
   const yielding = basis.tensionYield(gross, beam.steel.fy, rec);
   return Math.min(yielding, basis.tensionRupture(net, beam.steel.fu, rec));
 }
+/** Gross web in shear, N: at a cope what it leaves of the depth. */
+export function webShearGross(basis: Basis, beam: BeamEnd, rec: Rec): number {
+  const clause = basis.clauses.shearSection;
+  if (rec !== null) rec.line('A_gv', 'web in shear', 'depth left × t_w', beam.shearArea, 'mm²', clause);
+  return basis.shearYield(beam.shearArea, beam.steel.fy, rec);
+}
+
+/** Web in shear less the holes of one column, N. */
+export function webShearNet(basis: Basis, beam: BeamEnd, group: UprightGroup, rec: Rec): number {
+  const { thickness, deduction } = beam.web;
+  const net = Math.max(0, beam.shearArea - group.rows * deduction * thickness);
+  if (rec !== null) {
+    rec.line(
+      'A_nv',
+      'web less the holes of a column',
+      'A_gv − n d_h t_w',
+      net,
+      'mm²',
+      basis.clauses.shearSection,
+    );
+  }
+  return basis.shearRupture(net, beam.steel.fu, rec);
+}

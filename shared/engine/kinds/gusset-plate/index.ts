@@ -1,7 +1,5 @@
-import { createBasis } from '../../standards/registry.ts';
 import type { DetailKind } from '../../types.ts';
-import { basisFaults } from '../basis-faults.ts';
-import { validateFactors, validateParameters } from '../validate.ts';
+import { prepareWith } from '../prepare.ts';
 import { GussetDetail } from './detail.ts';
 import { limitStates } from './limits.ts';
 import { buildModel } from './model.ts';
@@ -21,19 +19,5 @@ export const gussetPlate: DetailKind = {
   limitStates: limitStates.map(({ id, code, title, part }) => ({ id, code, title, part })),
   rules,
   notes,
-  prepare(values, basisId, catalogue, factors) {
-    const checked = validateParameters(parameters, values, catalogue);
-    const faults = [...(checked.ok ? [] : checked.faults), ...validateFactors(factors)];
-    const basis = createBasis(basisId, factors);
-    if (basis === undefined) {
-      faults.push({
-        field: 'basis',
-        value: String(basisId).slice(0, 60),
-        message: 'There is no such design basis',
-      });
-    }
-    if (checked.ok && basis !== undefined) faults.push(...basisFaults(checked.values, basis));
-    if (!checked.ok || basis === undefined || faults.length > 0) return { ok: false, faults };
-    return { ok: true, detail: new GussetDetail(buildModel(checked.values, basis)) };
-  },
+  prepare: prepareWith(parameters, (values, basis) => new GussetDetail(buildModel(values, basis))),
 };

@@ -17,10 +17,17 @@ import type {
 import { AiscBearing } from './bearing.ts';
 import { nominalBlockShear, uniformity } from './block-shear.ts';
 import { longJointFactor, nominalBoltShear, stressesOf } from './bolt-shear.ts';
-import { criticalStress, E, nominalTensileRupture, nominalTensileYield } from './connected-elements.ts';
+import {
+  criticalStress,
+  E,
+  nominalShearRupture,
+  nominalShearYield,
+  nominalTensileRupture,
+  nominalTensileYield,
+} from './connected-elements.ts';
 import { detailing, standardClearance } from './detailing.ts';
 import { AiscFillet } from './fillet-line.ts';
-import { asd, type Format, lrfd, rupture, yielding } from './format.ts';
+import { asd, type Format, lrfd, rupture, shearYielding, yielding } from './format.ts';
 import { infoOf } from './notes.ts';
 import { shearLagFactor } from './shear-lag.ts';
 
@@ -35,6 +42,8 @@ const clauses: Readonly<Record<ClauseKey, string>> = {
   compression: 'AISC 360 J4.4, E3',
   memberNet: 'AISC 360 D2(b), D3',
   memberGross: 'AISC 360 D2(a)',
+  shearSection: 'AISC 360 J4.2',
+  webTension: 'AISC 360 J4.1',
 };
 
 /** ANSI/AISC 360-22 in one of its formats. Its factors are part of the standard, so a firm's are not used. */
@@ -173,6 +182,24 @@ class AiscBasis implements Basis {
         'N',
         'AISC 360 J4.1(b), D2(b)',
       );
+    }
+    return strength;
+  }
+
+  shearYield(Agv: number, Fy: number, rec: Rec): number {
+    const strength = this.format.factor(shearYielding) * nominalShearYield(Fy, Agv);
+    if (rec !== null) {
+      const formula = `0.60 F_y A_gv ${this.format.text(shearYielding)}`;
+      rec.line('V_y', 'yield', formula, strength, 'N', 'AISC 360 J4.2(a)');
+    }
+    return strength;
+  }
+
+  shearRupture(Anv: number, Fu: number, rec: Rec): number {
+    const strength = this.ofRupture * nominalShearRupture(Fu, Anv);
+    if (rec !== null) {
+      const formula = `0.60 F_u A_nv ${this.format.text(rupture)}`;
+      rec.line('V_u', 'rupture', formula, strength, 'N', 'AISC 360 J4.2(b)');
     }
     return strength;
   }

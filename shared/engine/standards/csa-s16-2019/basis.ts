@@ -24,6 +24,7 @@ import { E, phi } from './factors.ts';
 import { CsaFillet } from './fillet-weld.ts';
 import { info } from './notes.ts';
 import { grossYield, netSectionResistance, oneLegFactor } from './tension-member.ts';
+import { shearRupture, shearYield } from './shear-section.ts';
 
 const clauses: Readonly<Record<ClauseKey, string>> = {
   filletMetal: 'CSA S16 13.13.2.2',
@@ -36,6 +37,8 @@ const clauses: Readonly<Record<ClauseKey, string>> = {
   compression: 'CSA S16 13.3.1',
   memberNet: 'CSA S16 12.3.3.2, 13.2(a)(iii)',
   memberGross: 'CSA S16 13.2(a)(i)',
+  shearSection: 'CSA S16 13.4, 13.11',
+  webTension: 'CSA S16 13.2',
 };
 
 /** CSA S16:19. Resistance factors are part of the standard, so a firm's partial factors are not used. */
@@ -146,6 +149,20 @@ class CsaBasis implements Basis {
     if (rec !== null) {
       rec.line('T_r,u', 'rupture', 'φ_u A_ne F_u, φ_u = 0.75', strength, 'N', 'CSA S16 13.2(a)(iii)');
     }
+    return strength;
+  }
+
+  shearYield(Agv: number, Fy: number, rec: Rec): number {
+    const strength = shearYield(Agv, Fy);
+    if (rec !== null)
+      rec.line('V_r,y', 'yield', '0.60 φ A_gv F_y, φ = 0.90', strength, 'N', clauses.shearSection);
+    return strength;
+  }
+
+  shearRupture(Anv: number, Fu: number, rec: Rec): number {
+    const strength = shearRupture(Anv, Fu);
+    if (rec !== null)
+      rec.line('V_r,u', 'rupture', '0.60 φ_u A_nv F_u, φ_u = 0.75', strength, 'N', clauses.shearSection);
     return strength;
   }
 

@@ -22,6 +22,7 @@ import { detailing, normalClearance } from './detailing.ts';
 import { EnFillet } from './fillet-weld.ts';
 import { info } from './notes.ts';
 import { angleByOneLeg, equalAngleArea, grossYield, netSectionResistance } from './tension-member.ts';
+import { shearRupture, shearYield } from './shear-section.ts';
 
 const clauses: Readonly<Record<ClauseKey, string>> = {
   filletMetal: 'EN 1993-1-8 4.5.3',
@@ -34,6 +35,8 @@ const clauses: Readonly<Record<ClauseKey, string>> = {
   compression: 'EN 1993-1-1 6.3.1',
   memberNet: 'EN 1993-1-8 3.10.3, EN 1993-1-1 6.2.3',
   memberGross: 'EN 1993-1-1 6.2.3, 6.2.4',
+  shearSection: 'EN 1993-1-1 6.2.6, 6.2.3',
+  webTension: 'EN 1993-1-1 6.2.3',
 };
 
 /** EN 1993-1-8:2005 with EN 1993-1-1:2005, with a firm's partial factors. */
@@ -143,6 +146,22 @@ class EnBasis implements Basis {
     const strength = netSectionResistance(net, fu, this.factors.gammaM2);
     if (rec !== null) {
       rec.line('N_u,Rd', 'rupture', '0.9 A_net f_u/γ_M2', strength, 'N', 'EN 1993-1-1 6.2.3(2)b');
+    }
+    return strength;
+  }
+
+  shearYield(agv: number, fy: number, rec: Rec): number {
+    const strength = shearYield(agv, fy, this.factors.gammaM0);
+    if (rec !== null)
+      rec.line('V_pl,Rd', 'yield', 'A_v f_y/(√3 γ_M0)', strength, 'N', 'EN 1993-1-1 6.2.6(2)');
+    return strength;
+  }
+
+  shearRupture(anv: number, fu: number, rec: Rec): number {
+    const strength = shearRupture(anv, fu, this.factors.gammaM2);
+    if (rec !== null) {
+      const clause = 'EN 1993-1-1 6.2.6, rupture as in 6.2.3(2)b';
+      rec.line('V_u,Rd', 'rupture', 'A_v,net f_u/(√3 γ_M2)', strength, 'N', clause);
     }
     return strength;
   }

@@ -24,6 +24,7 @@ import { E, phi } from './factors.ts';
 import { SansFillet } from './fillet-weld.ts';
 import { info } from './notes.ts';
 import { grossYield, netSectionResistance, oneLegFactor } from './tension-member.ts';
+import { shearRupture, shearYield } from './shear-section.ts';
 
 const clauses: Readonly<Record<ClauseKey, string>> = {
   filletMetal: 'SANS 10162-1 13.13.2.2(b)',
@@ -36,6 +37,8 @@ const clauses: Readonly<Record<ClauseKey, string>> = {
   compression: 'SANS 10162-1 13.3.1',
   memberNet: 'SANS 10162-1 12.3.3.2, 13.2(a)(ii)',
   memberGross: 'SANS 10162-1 13.2(a)(i)',
+  shearSection: 'SANS 10162-1 13.4, 13.11',
+  webTension: 'SANS 10162-1 13.2',
 };
 
 /** SANS 10162-1:2011. Resistance factors are part of the standard, so a firm's partial factors are not used. */
@@ -148,6 +151,20 @@ class SansBasis implements Basis {
     if (rec !== null) {
       rec.line('T_r,u', 'rupture', '0.85 φ A_ne f_u, φ = 0.90', strength, 'N', 'SANS 10162-1 13.2(a)(ii)');
     }
+    return strength;
+  }
+
+  shearYield(agv: number, fy: number, rec: Rec): number {
+    const strength = shearYield(agv, fy);
+    if (rec !== null)
+      rec.line('V_r,y', 'yield', '0.60 φ A_gv f_y, φ = 0.90', strength, 'N', clauses.shearSection);
+    return strength;
+  }
+
+  shearRupture(anv: number, fu: number, rec: Rec): number {
+    const strength = shearRupture(anv, fu);
+    if (rec !== null)
+      rec.line('V_r,u', 'rupture', '0.60 φ A_nv f_u, φ = 0.90', strength, 'N', clauses.shearSection);
     return strength;
   }
 

@@ -1,0 +1,195 @@
+import { GroupBearing } from '../../limit-states/group-bearing.ts';
+import { type NetSection, netSectionOf } from '../../limit-states/net-section.ts';
+import type { UprightPly } from '../../limit-states/upright-block.ts';
+import { UprightForces } from '../../limit-states/upright-forces.ts';
+import {
+  groupHeight,
+  groupWidth,
+  type PlyEdges,
+  type UprightGroup,
+} from '../../limit-states/upright-group.ts';
+import type {
+  Basis,
+  BearingPly,
+  BoltInShear,
+  EdgeFinish,
+  FilletStrength,
+  HoleMaking,
+} from '../../standards/basis.ts';
+import { type BeamEnd, beamEndOf } from '../beam-end/beam.ts';
+import { isUsed } from '../given.ts';
+import { boltOf, noGrade, normalHole, noSteel, plateOf, weldedParts, type WeldedPlate } from '../parts.ts';
+import type { Resolved } from '../resolved.ts';
+import { TOLERANCE } from '../rules.ts';
+import { type Lines, linesOf } from './lines.ts';
+import { methodParameters } from './parameters-method.ts';
+
+/** Everything about one fin plate that does not change with the load angle. N, mm, MPa; y from the middle of the bolts. */
+export interface FinPlateModel extends WeldedPlate {
+  readonly values: Resolved;
+  readonly basis: Basis;
+  readonly gradeMissing: boolean;
+  readonly bolt: BoltInShear;
+  /** Shear of one bolt. */
+  readonly oneBolt: number;
+  readonly group: UprightGroup;
+  readonly firstColumn: number;
+  readonly lastColumn: number;
+  readonly height: number;
+  readonly width: number;
+  readonly endDistance: number;
+  readonly edgeDistance: number;
+  readonly deduction: number;
+  readonly finish: EdgeFinish;
+  readonly weldLeg: number;
+  readonly countedWeld: number;
+  readonly fillet: FilletStrength;
+  /** Leg at which both fillets are as strong across the plate as it yields. */
+  readonly fullStrengthLeg: number;
+  readonly lines: Lines;
+  /** A shear up and one down are both looked at, because the beam is not the same both ways. */
+  readonly bothWays: boolean;
+  readonly eitherWay: boolean;
+  readonly plastic: boolean;
+  readonly eccentricBlock: boolean;
+  readonly grossShearFactor: number;
+  readonly fitWaived: boolean;
+  readonly practiceWaived: boolean;
+  readonly ply: UprightPly;
+  readonly net: NetSection;
+  readonly beam: BeamEnd;
+  readonly plateBearing: GroupBearing;
+  readonly webBearing: GroupBearing;
+  readonly forces: UprightForces;
+}
+
+/** Handbooks divide the gross shear of the plate by this where it bends as well. */
+const HANDBOOK_SHEAR = 1.27;
+
+/** Puts checked parameters and a basis together. */
+export function buildModel(values: Resolved, basis: Basis): FinPlateModel {
+  const plate = plateOf(values);
+  const layout = layoutOf(values);
+  const { group, firstColumn, height } = layout;
+  const reduced = values.choice('long_joint') === 'reduced';
+  const bolt = boltOf(values, basis, 1, reduced ? groupHeight(group) : 0);
+  const deduction = bolt.holeDiameter + basis.holeAllowance(values.choice<HoleMaking>('hole_making'));
+  const beam = beamEndOf(values, group, firstColumn, deduction, noSteel);
+  const lines = linesOf(values, group, firstColumn);
+  const weld = weldOf(values, basis, plate, height, lines);
+  const oneBolt = basis.boltShear(bolt, null);
+  const eitherWay = values.choice('shear_direction') === 'either';
+  const { thickness } = plate;
+  const { fy, fu } = plate.plate;
+  const plateEdges = {
+    near: Infinity,
+    far: layout.edgeDistance,
+    above: layout.endDistance,
+    below: layout.endDistance,
+  };
+  const lap = { values, basis, bolt, group, oneBolt };
+  return {
+    ...plate,
+    ...layout,
+    ...weld,
+    values,
+    basis,
+    gradeMissing: bolt.grade === noGrade,
+    bolt,
+    oneBolt,
+    deduction,
+    finish: values.choice<EdgeFinish>('edge_finish'),
+    lines,
+    eitherWay,
+    bothWays: eitherWay && Math.abs(beam.edges.above - beam.edges.below) > TOLERANCE,
+    plastic: values.choice('plate_section') === 'plastic',
+    eccentricBlock: values.choice('block_pull') === 'eccentric',
+    grossShearFactor: isChosen(values, basis, 'gross_shear', 'reduced') ? HANDBOOK_SHEAR : 1,
+    fitWaived: values.choice('fit_checks') === 'waived',
+    practiceWaived: values.choice('practice_rules') === 'waived',
+    ply: { thickness, deduction, fy, fu },
+    net: netSectionOf(thickness, height, group.rows, group.pitch, deduction),
+    beam,
+    plateBearing: bearingOf(lap, thickness, fu, plateEdges),
+    webBearing: bearingOf(lap, beam.web.thickness, beam.steel.fu, beam.edges),
+    forces: new UprightForces(group),
+  };
+}
+
+function layoutOf(values: Resolved) {
+  const group: UprightGroup = {
+    rows: values.number('rows'),
+    columns: values.number('columns'),
+    pitch: values.number('pitch'),
+    gauge: values.number('gauge'),
+  };
+  const firstColumn = values.number('first_column');
+  const lastColumn = firstColumn + groupWidth(group);
+  const endDistance = values.number('plate_end_distance');
+  const edgeDistance = values.number('plate_edge_distance');
+  return {
+    group,
+    firstColumn,
+    lastColumn,
+    endDistance,
+    edgeDistance,
+    height: groupHeight(group) + 2 * endDistance,
+    width: lastColumn + edgeDistance,
+  };
+}
+
+function weldOf(values: Resolved, basis: Basis, plate: WeldedPlate, height: number, lines: Lines) {
+  const weldLeg = values.number('weld_leg');
+  const spec = {
+    leg: weldLeg,
+    xu: values.electrode('electrode').xu,
+    parts: weldedParts(plate),
+    directional: values.choice('weld_method') === 'directional',
+    matching: values.choice('electrode_match') === 'matching',
+  };
+  const fillet = basis.fillet({ ...spec, concentric: lines.weldLever <= TOLERANCE });
+  const deducted = values.choice('weld_ends') === 'deducted';
+  // In the plate at yield across its thickness a fillet has half of it, t f_yd/2 per mm; its use falls as it grows.
+  const force = (plate.thickness * basis.yieldStress(plate.plate.fy)) / 2;
+  const use = basis.fillet({ ...spec, concentric: true }).metalUtilisation(force, 0, null);
+  return {
+    weldLeg,
+    fillet,
+    fullStrengthLeg: weldLeg * use,
+    countedWeld: Math.max(1, height - (deducted ? fillet.runOut : 0)),
+  };
+}
+
+interface Lap {
+  readonly values: Resolved;
+  readonly basis: Basis;
+  readonly bolt: BoltInShear;
+  readonly group: UprightGroup;
+  readonly oneBolt: number;
+}
+
+/** Bearing on one ply; a basis may hold it down across a single column or a single row. */
+function bearingOf(lap: Lap, thickness: number, fu: number, edges: PlyEdges): GroupBearing {
+  const { values, basis, bolt, group, oneBolt } = lap;
+  const limited = values.choice('single_lap') === 'limited';
+  const ply: BearingPly = {
+    ...bolt,
+    normalHole: normalHole(values, basis) ?? bolt.holeDiameter,
+    thickness,
+    fu,
+    singleLapOneRow: false,
+    // Shear of the bolts is a limit state of its own, found for the most loaded bolt.
+    boltShear: Infinity,
+    deformationMatters: values.choice('hole_deformation') === 'limited',
+  };
+  const level = basis.bearing({ ...ply, singleLapOneRow: limited && group.columns === 1 });
+  const upright = basis.bearing({ ...ply, singleLapOneRow: limited && group.rows === 1 });
+  const least = values.choice('bolt_bearing') === 'least';
+  return new GroupBearing(basis, level, upright, group, edges, oneBolt, least);
+}
+
+/** Whether a method is chosen and the basis has that choice. */
+function isChosen(values: Resolved, basis: Basis, name: string, value: string): boolean {
+  const spec = methodParameters.find((one) => one.name === name);
+  return spec !== undefined && isUsed(spec, values, basis) && values.choice(name) === value;
+}
