@@ -28,7 +28,7 @@ export const revisionResponse = z.object({
   signatures: z.array(
     z.object({
       person: personRefSchema,
-      verdict: z.enum(['signed', 'returned']),
+      verdict: z.enum(['submitted', 'signed', 'returned']),
       comment: z.string(),
       at: instantSchema,
     }),

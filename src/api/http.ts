@@ -48,7 +48,10 @@ async function send(method: Method, path: string, options: RequestOptions): Prom
 /** Renews the session; every request that waits for it shares the one attempt. */
 function refresh(): Promise<boolean> {
   refreshing ??= send('POST', '/api/auth/refresh', {})
-    .then((response) => response.ok)
+    .then(async (response) => {
+      await response.body?.cancel();
+      return response.ok;
+    })
     .finally(() => {
       refreshing = undefined;
     });

@@ -1,5 +1,5 @@
 import { defineStore } from 'pinia';
-import { computed, ref } from 'vue';
+import { readonly, shallowRef } from 'vue';
 
 export type Tone = 'good' | 'bad' | 'plain';
 export interface Notice {
@@ -8,19 +8,18 @@ export interface Notice {
   readonly tone: Tone;
 }
 
-/** Short sentences that say what has just happened, one after the other. */
+/** A short sentence that says what has just happened; the newest takes the place of the one before. */
 export const useNoticesStore = defineStore('notices', () => {
-  const waiting = ref<Notice[]>([]);
-  const current = computed(() => waiting.value[0] ?? null);
+  const current = shallowRef<Notice | null>(null);
   let last = 0;
 
   function say(text: string, tone: Tone = 'good'): void {
-    waiting.value.push({ id: ++last, text, tone });
+    current.value = { id: ++last, text, tone };
   }
 
   function dismiss(): void {
-    waiting.value.shift();
+    current.value = null;
   }
 
-  return { current, say, dismiss };
+  return { current: readonly(current), say, dismiss };
 });

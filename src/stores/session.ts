@@ -3,6 +3,7 @@ import { defineStore } from 'pinia';
 import { computed, ref } from 'vue';
 import * as auth from '../api/auth.ts';
 import { ProblemError } from '../api/problem.ts';
+import { sessionHint } from '../composables/session-hint.ts';
 
 const NOBODY: Me['can'] = {
   defineFamilies: false,
@@ -19,6 +20,7 @@ export const useSessionStore = defineStore('session', () => {
   let asked: Promise<void> | undefined;
 
   async function fetchWho(): Promise<void> {
+    if (!sessionHint.isSet()) return;
     try {
       me.value = await auth.fetchMe();
     } catch (error) {
@@ -38,11 +40,13 @@ export const useSessionStore = defineStore('session', () => {
 
   async function signIn(email: string, password: string): Promise<void> {
     await auth.signIn({ email, password });
+    sessionHint.set();
     me.value = await auth.fetchMe();
     asked = Promise.resolve();
   }
 
   function forget(): void {
+    sessionHint.clear();
     me.value = null;
     asked = Promise.resolve();
   }

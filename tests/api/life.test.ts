@@ -85,7 +85,10 @@ test('the same definition gives the same hash', async () => {
 test('a returned revision is a draft without its sweep', async () => {
   const returned = await step(engineer, await inCheck('GP-05'), 'return', { comment: 'The pitch is wrong.' });
   expect(returned).toMatchObject({ state: 'draft', variants: null });
-  expect(returned.signatures).toMatchObject([{ verdict: 'returned', comment: 'The pitch is wrong.' }]);
+  expect(returned.signatures).toMatchObject([
+    { verdict: 'submitted' },
+    { verdict: 'returned', comment: 'The pitch is wrong.' },
+  ]);
   expect(await harness.db.select('SELECT 1 FROM variants WHERE revision_id = ?', [returned.id])).toEqual([]);
 });
 

@@ -7,6 +7,7 @@ import { revisionTriggers } from './015-revision-triggers.ts';
 import { variantTriggers } from './016-variant-triggers.ts';
 import { appendOnly } from './017-append-only.ts';
 import { drawingSymbols } from './018-drawing-symbols.ts';
+import { submissions } from './019-submissions.ts';
 import type { Migration } from './migration.ts';
 
 /** In the order in which they are applied. */
@@ -29,4 +30,5 @@ export const migrations: readonly Migration[] = [
   variantTriggers,
   appendOnly,
   drawingSymbols,
+  submissions,
 ];

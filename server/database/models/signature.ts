@@ -9,12 +9,12 @@ export interface SignatureRow extends Model<
   id: CreationOptional<number>;
   revisionId: number;
   personId: number;
-  verdict: 'signed' | 'returned';
+  verdict: 'submitted' | 'signed' | 'returned';
   comment: string;
   at: Date;
 }
 
-/** What a checker said of a revision; never altered. */
+/** What its author and its checkers said of a revision; never altered. */
 export const defineSignature = (sequelize: Sequelize) =>
   sequelize.define<SignatureRow>(
     'signature',

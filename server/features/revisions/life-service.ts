@@ -12,7 +12,9 @@ type Change = (app: App, person: SignedInPerson, id: number, version: number) =>
 export const submitRevision =
   (comment: string): Change =>
   (app, person, id, version) =>
-    changeRevision(app, person, id, version, 'submit', async ({ row, transaction, now }) => {
+    changeRevision(app, person, id, version, 'submit', async (held) => {
+      await addSignature(held, 'submitted', comment);
+      const { row, transaction, now } = held;
       await row.update({ state: 'in-check', submittedAt: now }, { transaction });
       return { action: 'revision.submitted', detail: { comment } };
     });
@@ -109,7 +111,7 @@ export async function throwSweepAway({ app, row, transaction }: Pick<Held, 'app'
 
 async function addSignature(
   { app, row, person, transaction, now }: Held,
-  verdict: 'signed' | 'returned',
+  verdict: 'submitted' | 'signed' | 'returned',
   comment: string,
 ) {
   const signature = { revisionId: row.id, personId: person.id, verdict, comment, at: now };
