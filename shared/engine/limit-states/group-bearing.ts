@@ -14,6 +14,11 @@ export class GroupBearing {
   readonly towards: Float64Array;
   readonly up: Float64Array;
   readonly down: Float64Array;
+  /** One over each strength, for the sweep; a strength of 0 leaves nothing to any force. */
+  private readonly perAway: Float64Array;
+  private readonly perTowards: Float64Array;
+  private readonly perUp: Float64Array;
+  private readonly perDown: Float64Array;
   /** The least of the group in each direction is used throughout. */
   readonly leastThroughout: boolean;
 
@@ -39,6 +44,10 @@ export class GroupBearing {
     const most = Math.max(...all.map((strengths) => Math.max(...strengths)));
     this.leastThroughout = leastChosen || basis.leastBearingThroughout(most, boltShear);
     if (this.leastThroughout) for (const strengths of all) strengths.fill(Math.min(...strengths));
+    this.perAway = this.away.map(inverse);
+    this.perTowards = this.towards.map(inverse);
+    this.perUp = this.up.map(inverse);
+    this.perDown = this.down.map(inverse);
   }
 
   /**
@@ -61,8 +70,8 @@ export class GroupBearing {
   }
 
   private squared(bolt: number, x: number, y: number): number {
-    const ux = x / (x > 0 ? this.away : this.towards)[bolt]!;
-    const uy = y / (y > 0 ? this.up : this.down)[bolt]!;
+    const ux = x * (x > 0 ? this.perAway : this.perTowards)[bolt]!;
+    const uy = y * (y > 0 ? this.perUp : this.perDown)[bolt]!;
     return ux * ux + uy * uy;
   }
 
@@ -126,4 +135,9 @@ export class GroupBearing {
     if (x !== 0) rec.line('R_bx', 'least of the group', '', level, 'N', clause);
     if (y !== 0) rec.line('R_by', 'least of the group', '', upright, 'N', clause);
   }
+}
+
+/** Finite, so that no force at all stays none beside a strength of 0. */
+function inverse(strength: number): number {
+  return Math.min(1 / strength, 1e100);
 }
