@@ -1,4 +1,5 @@
 import type { Check } from './check.ts';
+import { finPlates } from './details/fin-plate.ts';
 import { gussetPlates } from './details/gusset-plate.ts';
 import { enBearingTables } from './en/bearing-tables.ts';
 import { enBolts } from './en/bolts.ts';
@@ -16,4 +17,5 @@ export const checks: readonly Check[] = [
   ...sansSameExpression,
   ...sansRuleEvaluations,
   ...gussetPlates,
+  ...finPlates,
 ];

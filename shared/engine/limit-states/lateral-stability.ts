@@ -1,15 +1,15 @@
 import type { Basis, Rec } from '../standards/basis.ts';
 
-/** A plate is long where it stands out farther than its thickness over this. */
-const LONG = 0.15;
+/**
+ * How far a plate may stand out to its bolts before it is long, mm: `t/0.15`. Steel Buildings in Europe, Multi-Storey
+ * Steel Buildings Part 5, 3.1.
+ */
+export function shortPlateReach(thickness: number): number {
+  return thickness / 0.15;
+}
 
 /** Elastic moduli of steel: E over G. */
 const E_OVER_G = 2.6;
-
-/** Whether a plate that stands out `reach` to its bolts is long enough for lateral buckling. mm. */
-export function isLongPlate(thickness: number, reach: number): boolean {
-  return reach > thickness / LONG;
-}
 
 /**
  * Moment that an upright plate t x h carries between the weld and the bolts without buckling sideways, N mm.

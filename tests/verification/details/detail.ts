@@ -3,6 +3,7 @@ import {
   type EngineCatalogue,
   findKind,
   kilonewtons,
+  type KindId,
   type ParameterValues,
   type PreparedDetail,
   type Sense,
@@ -14,6 +15,8 @@ const nothing: EngineCatalogue = { boltSizes: [], boltGrades: [], steels: [], el
 
 /** One whole detail at one load angle. */
 export interface WholeDetail {
+  /** A gusset plate where it is left out. */
+  readonly kind?: KindId;
   readonly basis: BasisId;
   readonly values: ParameterValues;
   /** Degrees. */
@@ -21,8 +24,8 @@ export interface WholeDetail {
   readonly sense: Sense;
 }
 
-function prepare({ basis, values }: WholeDetail): PreparedDetail {
-  const prepared = findKind('gusset-plate')?.prepare({ electrode: { xu: 480 }, ...values }, basis, nothing);
+function prepare({ kind = 'gusset-plate', basis, values }: WholeDetail): PreparedDetail {
+  const prepared = findKind(kind)?.prepare({ electrode: { xu: 480 }, ...values }, basis, nothing);
   if (prepared === undefined || !prepared.ok) throw new Error(JSON.stringify(prepared?.faults));
   return prepared.detail;
 }

@@ -1,4 +1,4 @@
-import { isLongPlate, lateralMoment } from '../../limit-states/lateral-stability.ts';
+import { lateralMoment, shortPlateReach } from '../../limit-states/lateral-stability.ts';
 import { blockAcross, blockAlong } from '../../limit-states/upright-block.ts';
 import type { Rec } from '../../standards/basis.ts';
 import type { Recorder } from '../../types.ts';
@@ -37,9 +37,10 @@ export class Strengths {
     this.plateTension = plateTension(m, null);
     this.plateBlockAlong = this.alongPlate(null);
     this.plateBlockAcross = this.acrossPlate(null);
-    this.lateralMoment = isLongPlate(thickness, firstColumn)
-      ? lateralMoment(basis, thickness, height, firstColumn, m.plate.fy, null)
-      : Infinity;
+    this.lateralMoment =
+      firstColumn > shortPlateReach(thickness)
+        ? lateralMoment(basis, thickness, height, firstColumn, m.plate.fy, null)
+        : Infinity;
     this.webShearGross = webShearGross(basis, beam, null);
     this.webShearNet = webShearNet(basis, beam, group, null);
     this.webBlockUp = webBlockAlong(basis, beam, group, true, m.eccentricBlock, null);
