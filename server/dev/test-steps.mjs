@@ -44,7 +44,7 @@ function countReport(report) {
 /** Runs one Vitest project; none of its tests having run, or a crash of the runner, is a failure too. */
 export async function runProject(name) {
   const files = testProjects[name].flatMap((folder) => testFilesBelow(inRoot(folder)));
-  if (files.length === 0) return { name, passed: 0, failed: 0, skipped: 0 };
+  if (files.length === 0) return { name, passed: 0, failed: 1, skipped: 0 };
   const folder = mkdtempSync(join(tmpdir(), 'backmark-report-'));
   const output = join(folder, 'report.json');
   const vitest = inRoot('node_modules/vitest/vitest.mjs');
