@@ -9,8 +9,10 @@ import { catalogue } from './gusset.ts';
 
 const parameters = findKind('gusset-plate')?.parameters ?? [];
 
+export type Ranges = Readonly<Record<string, readonly [number, number]>>;
+
 /** Values that make sense together more often than the whole of each range would. mm. */
-const likely: Readonly<Record<string, readonly [number, number]>> = {
+const gussetRanges: Ranges = {
   plate_thickness: [6, 30],
   projection: [250, 900],
   gusset_end_distance: [30, 110],
@@ -36,7 +38,9 @@ function names({ type, shapes }: ParameterSpec): string[] {
     case 'steel':
       return catalogue.steels.map(({ name }) => name);
     case 'boltSize':
-      return catalogue.boltSizes.filter(({ hole }) => hole.aisc !== null && hole.csa !== null).map(({ name }) => name);
+      return catalogue.boltSizes
+        .filter(({ hole }) => hole.aisc !== null && hole.csa !== null)
+        .map(({ name }) => name);
     case 'boltGrade':
       return catalogue.boltGrades.filter(({ nominal }) => nominal !== null).map(({ name }) => name);
     case 'electrode':
@@ -48,7 +52,7 @@ function names({ type, shapes }: ParameterSpec): string[] {
   }
 }
 
-function arbitraryValue(spec: ParameterSpec, wide: boolean): fc.Arbitrary<ParameterValue> {
+function arbitraryValue(spec: ParameterSpec, likely: Ranges, wide: boolean): fc.Arbitrary<ParameterValue> {
   const [minimum, maximum] = (wide ? undefined : likely[spec.name]) ?? [spec.minimum ?? 0, spec.maximum ?? 0];
   if (spec.type === 'count') return fc.integer({ min: minimum, max: maximum });
   if (spec.type === 'length' || spec.type === 'number') {
@@ -58,8 +62,20 @@ function arbitraryValue(spec: ParameterSpec, wide: boolean): fc.Arbitrary<Parame
   return fc.constantFrom(...names(spec));
 }
 
-/** Parameter values that pass the schema; `wide` draws from the whole of every range. */
-export function gussetValues(wide: boolean): fc.Arbitrary<ParameterValues> {
-  const entries = parameters.map((spec) => [spec.name, arbitraryValue(spec, wide)] as const);
+/**
+ * Parameter values that pass the schema of a kind.
+ * @param likely ranges that make sense together; `wide` draws from the whole of every range instead
+ */
+export function valuesOf(
+  specs: readonly ParameterSpec[],
+  likely: Ranges,
+  wide: boolean,
+): fc.Arbitrary<ParameterValues> {
+  const entries = specs.map((spec) => [spec.name, arbitraryValue(spec, likely, wide)] as const);
   return fc.record(Object.fromEntries(entries));
+}
+
+/** Parameter values of a gusset plate that pass its schema. */
+export function gussetValues(wide: boolean): fc.Arbitrary<ParameterValues> {
+  return valuesOf(parameters, gussetRanges, wide);
 }
