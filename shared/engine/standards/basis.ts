@@ -36,7 +36,9 @@ export type ClauseKey =
   | 'memberNet'
   | 'memberGross'
   | 'shearSection'
-  | 'webTension';
+  | 'webTension'
+  | 'boltTension'
+  | 'boltCombined';
 
 /** One bolt in shear. mm, mm2, MPa. */
 export interface BoltInShear {
@@ -47,6 +49,16 @@ export interface BoltInShear {
   readonly threadsInPlane: boolean;
   /** Between the end fasteners, along the force. */
   readonly jointLength: number;
+}
+
+/** One bolt in tension, and the ply that its head or nut could punch through. mm, MPa. */
+export interface BoltInTension {
+  readonly size: BoltSize;
+  readonly grade: BoltGrade;
+  /** Mean of the widths of the head or the nut across points and across flats. */
+  readonly headDiameter: number;
+  readonly plateThickness: number;
+  readonly plateFu: number;
 }
 
 /** The ply that a bolt bears on. */
@@ -162,6 +174,13 @@ export interface Basis {
   /** The strengths of a catalogued grade at a bolt diameter, or null when the grade has none there. */
   grade(grade: CatalogueGrade, d: number): BoltGrade | null;
   boltShear(bolt: BoltInShear, rec: Rec): number;
+  /** Strength of one bolt in tension, N: the bolt itself and, where the basis has it, punching of its ply. */
+  boltTension(bolt: BoltInTension, rec: Rec): number;
+  /**
+   * Tension that one bolt still takes beside a shear, N, not below 0. `tension` from `boltTension`, N; `shearRatio`
+   * shear over shear strength of that bolt: 0 gives `tension` back. The shear strength itself is a check of its own.
+   */
+  tensionWithShear(tension: number, shearRatio: number, rec: Rec): number;
   bearing(ply: BearingPly): BearingStrength;
   /** Strength of a group in bearing from that of its bolts, N: number, least, greatest, sum, shear of one bolt. */
   bearingGroup(count: number, least: number, most: number, sum: number, boltShear: number, rec: Rec): number;

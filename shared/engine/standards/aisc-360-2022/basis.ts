@@ -7,6 +7,7 @@ import type {
   BearingStrength,
   BlockPull,
   BoltInShear,
+  BoltInTension,
   CatalogueBoltSize,
   CatalogueGrade,
   ClauseKey,
@@ -17,6 +18,7 @@ import type {
 import { AiscBearing } from './bearing.ts';
 import { nominalBlockShear, uniformity } from './block-shear.ts';
 import { longJointFactor, nominalBoltShear, stressesOf } from './bolt-shear.ts';
+import { nominalBoltTension, tensionBesideShear } from './bolt-tension.ts';
 import {
   criticalStress,
   E,
@@ -44,6 +46,8 @@ const clauses: Readonly<Record<ClauseKey, string>> = {
   memberGross: 'AISC 360 D2(a)',
   shearSection: 'AISC 360 J4.2',
   webTension: 'AISC 360 J4.1',
+  boltTension: 'AISC 360 J3.7',
+  boltCombined: 'AISC 360 J3.8',
 };
 
 /** ANSI/AISC 360-22 in one of its formats. Its factors are part of the standard, so a firm's are not used. */
@@ -103,6 +107,30 @@ class AiscBasis implements Basis {
       rec.line('r_v', 'shear of one bolt', formula, strength, 'N', clause);
     }
     return strength;
+  }
+
+  boltTension({ size, grade }: BoltInTension, rec: Rec): number {
+    const Ab = (Math.PI * size.d * size.d) / 4;
+    const Fnt = stressesOf(grade).fnt;
+    const strength = this.ofRupture * nominalBoltTension({ Fnt, Ab });
+    if (rec !== null) {
+      const clause = clauses.boltTension;
+      rec.line('A_b', 'nominal unthreaded area', 'π d²/4', Ab, 'mm²', clause);
+      rec.line('F_nt', 'tensile stress', '', Fnt, 'MPa', 'AISC 360 Table J3.2');
+      rec.line('r_t', 'tension of one bolt', `F_nt A_b ${this.format.text(rupture)}`, strength, 'N', clause);
+    }
+    return strength;
+  }
+
+  tensionWithShear(tension: number, v: number, rec: Rec): number {
+    const left = tensionBesideShear(tension, v);
+    if (rec !== null) {
+      const clause = clauses.boltCombined;
+      const share = this.format.id === 'lrfd' ? 'f_rv/(φ F_nv)' : 'Ω f_rv/F_nv';
+      rec.line('v', 'shear on the bolt', share, v, '', clause);
+      rec.line('r_t,v', 'tension beside the shear', '(1.3 − v) r_t ≤ r_t', left, 'N', clause);
+    }
+    return left;
   }
 
   bearing(ply: BearingPly): BearingStrength {

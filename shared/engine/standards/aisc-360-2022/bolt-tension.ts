@@ -10,6 +10,16 @@ export function nominalBoltTension(i: { Fnt: number; Ab: number }): number {
 }
 
 /**
+ * Available tension of a bolt beside a shear, N: `T min(1, 1.3 - v)`, not below 0.
+ *
+ * T available tension without shear, N; v required over available shear of that bolt, in one format: f_rv/(phi F_nv) or
+ * Omega f_rv/F_nv. It is `tensileStressWithShear` in ratios. ANSI/AISC 360-22, J3.8, (J3-2), (J3-3a), (J3-3b).
+ */
+export function tensionBesideShear(T: number, v: number): number {
+  return T * Math.max(0, Math.min(1, 1.3 - v));
+}
+
+/**
  * Nominal tensile stress of a bolt that also carries shear, MPa, not below 0:
  *
  *   LRFD  F'_nt = 1.3 F_nt - F_nt f_rv/(phi F_nv) <= F_nt

@@ -1,7 +1,7 @@
 export { clearDistance, nominalBearing, nominalTearOut } from './bearing.ts';
 export { nominalBlockShear, uniformity } from './block-shear.ts';
 export { longJointFactor, nominalBoltShear, stressesOf, threadedPartStresses } from './bolt-shear.ts';
-export { nominalBoltTension, tensileStressWithShear } from './bolt-tension.ts';
+export { nominalBoltTension, tensileStressWithShear, tensionBesideShear } from './bolt-tension.ts';
 export {
   criticalStress,
   nominalShearRupture,

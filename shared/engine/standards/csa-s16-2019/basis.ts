@@ -7,6 +7,7 @@ import type {
   BearingStrength,
   BlockPull,
   BoltInShear,
+  BoltInTension,
   CatalogueBoltSize,
   CatalogueGrade,
   ClauseKey,
@@ -18,6 +19,7 @@ import type {
 import { CsaBearing } from './bearing.ts';
 import { blockResistance, tensionEfficiency } from './block-shear.ts';
 import { boltShearResistance, shearCoefficient } from './bolt-shear.ts';
+import { boltTensionResistance, tensionBesideShear } from './bolt-tension.ts';
 import { compressionResistance, slenderness } from './compression.ts';
 import { detailing } from './detailing.ts';
 import { E, phi } from './factors.ts';
@@ -39,6 +41,8 @@ const clauses: Readonly<Record<ClauseKey, string>> = {
   memberGross: 'CSA S16 13.2(a)(i)',
   shearSection: 'CSA S16 13.4, 13.11',
   webTension: 'CSA S16 13.2',
+  boltTension: 'CSA S16 13.12.1.3',
+  boltCombined: 'CSA S16 13.12.1.4',
 };
 
 /** CSA S16:19. Resistance factors are part of the standard, so a firm's partial factors are not used. */
@@ -84,6 +88,28 @@ class CsaBasis implements Basis {
       rec.line('V_r', 'shear of one bolt', formula, Vr, 'N', clause);
     }
     return Vr;
+  }
+
+  boltTension({ size, grade }: BoltInTension, rec: Rec): number {
+    const Ab = (Math.PI * size.d * size.d) / 4;
+    const Tr = boltTensionResistance({ Ab, Fu: grade.fub });
+    if (rec !== null) {
+      const clause = clauses.boltTension;
+      rec.line('A_b', 'nominal shank area', 'π d²/4', Ab, 'mm²', clause);
+      rec.line('F_u', 'tensile strength of the bolt', '', grade.fub, 'MPa', clause);
+      rec.line('T_r', 'tension of one bolt', '0.75 φ_b A_b F_u, φ_b = 0.80', Tr, 'N', clause);
+    }
+    return Tr;
+  }
+
+  tensionWithShear(Tr: number, v: number, rec: Rec): number {
+    const left = tensionBesideShear(Tr, v);
+    if (rec !== null) {
+      const clause = clauses.boltCombined;
+      rec.line('v', 'shear on the bolt', 'V/V_r', v, '', clause);
+      rec.line('T_r,v', 'tension beside the shear', '√(1 − v²) T_r', left, 'N', clause);
+    }
+    return left;
   }
 
   bearing(ply: BearingPly): BearingStrength {

@@ -11,6 +11,14 @@ export function boltTensionResistance(i: { Ab: number; Fu: number }): number {
 }
 
 /**
+ * Tension that a bolt takes beside a shear, N: `T_r sqrt(1 - v^2)`, 0 from v = 1 on. v = V/V_r; T_r N.
+ * CSA S16:19, 13.12.1.4.
+ */
+export function tensionBesideShear(Tr: number, v: number): number {
+  return Tr * Math.sqrt(Math.max(0, 1 - v * v));
+}
+
+/**
  * Utilisation of a bolt in shear and tension together, as a share of the resultant: `sqrt((V/V_r)^2 + (T/T_r)^2)`.
  * The standard limits the sum of squares to 1. Forces and resistances in the same unit. CSA S16:19, 13.12.1.4.
  */

@@ -7,6 +7,7 @@ import type {
   BearingStrength,
   BlockPull,
   BoltInShear,
+  BoltInTension,
   CatalogueBoltSize,
   CatalogueGrade,
   ClauseKey,
@@ -17,6 +18,7 @@ import type {
 import { EnBearing } from './bearing.ts';
 import { blockTearing } from './block-tearing.ts';
 import { boltShearResistance, longJointFactor, shearCoefficient, smallBoltFactor } from './bolt-shear.ts';
+import { boltTensionResistance, punchingResistance, tensionBesideShear } from './bolt-tension.ts';
 import { columnCurveC, compressionResistance, E, slenderness } from './compression.ts';
 import { detailing, normalClearance } from './detailing.ts';
 import { EnFillet } from './fillet-weld.ts';
@@ -37,6 +39,8 @@ const clauses: Readonly<Record<ClauseKey, string>> = {
   memberGross: 'EN 1993-1-1 6.2.3, 6.2.4',
   shearSection: 'EN 1993-1-1 6.2.6, 6.2.3',
   webTension: 'EN 1993-1-1 6.2.3',
+  boltTension: 'EN 1993-1-8 Table 3.4',
+  boltCombined: 'EN 1993-1-8 Table 3.4',
 };
 
 /** EN 1993-1-8:2005 with EN 1993-1-1:2005, with a firm's partial factors. */
@@ -83,6 +87,33 @@ class EnBasis implements Basis {
       if (small < 1) rec.line('k_s', 'M12, M14, 2 mm clearance', '', small, '', 'EN 1993-1-8 3.6.1(5)');
     }
     return bolt.planes * plane * long * small;
+  }
+
+  boltTension(bolt: BoltInTension, rec: Rec): number {
+    const { size, grade, headDiameter: dm, plateThickness: tp, plateFu: fu } = bolt;
+    const { gammaM2 } = this.factors;
+    const FtRd = boltTensionResistance({ fub: grade.fub, As: size.stressArea, gammaM2 });
+    const BpRd = punchingResistance({ dm, tp, fu, gammaM2 });
+    if (rec !== null) {
+      const clause = clauses.boltTension;
+      rec.line('A_s', 'tensile stress area', '', size.stressArea, 'mm²', clause);
+      rec.line('f_ub', 'tensile strength of the bolt', '', grade.fub, 'MPa', clause);
+      rec.line('F_t,Rd', 'tension of one bolt', '0.9 f_ub A_s/γ_M2', FtRd, 'N', clause);
+      rec.line('d_m', 'mean width of the head or nut', '', dm, 'mm', clause);
+      rec.line('B_p,Rd', 'punching of the ply', '0.6 π d_m t_p f_u/γ_M2', BpRd, 'N', clause);
+    }
+    return Math.min(FtRd, BpRd);
+  }
+
+  tensionWithShear(FtRd: number, v: number, rec: Rec): number {
+    const left = tensionBesideShear(FtRd, v);
+    if (rec !== null) {
+      const clause = clauses.boltCombined;
+      rec.line('v', 'shear on the bolt', 'F_v/F_v,Rd', v, '', clause);
+      const formula = '1.4 F_t,Rd (1 − v) ≤ F_t,Rd, F_t,Rd not above B_p,Rd';
+      rec.line('F_t,v,Rd', 'tension beside the shear', formula, left, 'N', clause);
+    }
+    return left;
   }
 
   bearing(ply: BearingPly): BearingStrength {

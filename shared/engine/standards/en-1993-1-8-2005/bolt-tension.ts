@@ -16,6 +16,14 @@ export function punchingResistance(i: { dm: number; tp: number; fu: number; gamm
 }
 
 /**
+ * Tension that a bolt takes beside a shear, N: `1.4 F_t,Rd (1 - F_v/F_v,Rd)`, from 0 to F_t,Rd.
+ * v = F_v/F_v,Rd; FtRd N. EN 1993-1-8:2005, Table 3.4.
+ */
+export function tensionBesideShear(FtRd: number, v: number): number {
+  return FtRd * Math.max(0, Math.min(1, 1.4 * (1 - v)));
+}
+
+/**
  * Utilisation of a bolt in shear and tension: the greater of `F_v/F_v,Rd + F_t/(1.4 F_t,Rd)` and `F_t/F_t,Rd`.
  * EN 1993-1-8:2005, Table 3.4.
  */

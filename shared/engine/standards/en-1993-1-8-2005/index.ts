@@ -1,7 +1,12 @@
 export { alphaB, bearingResistance, edgeFactor, singleLapLimit } from './bearing.ts';
 export { blockTearing } from './block-tearing.ts';
 export { boltShearResistance, longJointFactor, shearCoefficient, smallBoltFactor } from './bolt-shear.ts';
-export { boltTensionResistance, punchingResistance, shearTensionUtilisation } from './bolt-tension.ts';
+export {
+  boltTensionResistance,
+  punchingResistance,
+  shearTensionUtilisation,
+  tensionBesideShear,
+} from './bolt-tension.ts';
 export { columnCurveC, compressionResistance, slenderness } from './compression.ts';
 export { correlationFactor, filletDirectional, filletSimplified } from './fillet-weld.ts';
 export {

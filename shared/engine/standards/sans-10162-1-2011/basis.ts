@@ -7,6 +7,7 @@ import type {
   BearingStrength,
   BlockPull,
   BoltInShear,
+  BoltInTension,
   CatalogueBoltSize,
   CatalogueGrade,
   ClauseKey,
@@ -18,6 +19,7 @@ import type {
 import { SansBearing } from './bearing.ts';
 import { blockTearing } from './block-shear.ts';
 import { boltShearResistance, longJointFactor } from './bolt-shear.ts';
+import { boltTensionResistance, tensionBesideShear } from './bolt-tension.ts';
 import { compressionResistance, slenderness } from './compression.ts';
 import { detailing } from './detailing.ts';
 import { E, phi } from './factors.ts';
@@ -39,6 +41,8 @@ const clauses: Readonly<Record<ClauseKey, string>> = {
   memberGross: 'SANS 10162-1 13.2(a)(i)',
   shearSection: 'SANS 10162-1 13.4, 13.11',
   webTension: 'SANS 10162-1 13.2',
+  boltTension: 'SANS 10162-1 13.12.1.2',
+  boltCombined: 'SANS 10162-1 13.12.1.3',
 };
 
 /** SANS 10162-1:2011. Resistance factors are part of the standard, so a firm's partial factors are not used. */
@@ -85,6 +89,32 @@ class SansBasis implements Basis {
       rec.line('k_L', 'long joint', '1 up to 15 d, then 1.075 − 0.005 L/d ≥ 0.75', factor, '', clause);
     }
     return single * factor;
+  }
+
+  boltTension({ size, grade }: BoltInTension, rec: Rec): number {
+    const Ab = (Math.PI * size.d * size.d) / 4;
+    const Tr = boltTensionResistance({ Ab, fub: grade.fub });
+    if (rec !== null) {
+      const clause = clauses.boltTension;
+      rec.line('A_b', 'nominal shank area', 'π d²/4', Ab, 'mm²', clause);
+      rec.line('f_ub', 'tensile strength of the bolt', '', grade.fub, 'MPa', clause);
+      rec.line('T_r', 'tension of one bolt', '0.75 φ_b A_b f_ub, φ_b = 0.80', Tr, 'N', clause);
+    }
+    return Tr;
+  }
+
+  tensionWithShear(Tr: number, v: number, rec: Rec): number {
+    const left = tensionBesideShear(Tr, v);
+    if (rec !== null) {
+      const clause = clauses.boltCombined;
+      rec.line('v', 'shear on the bolt', 'V/V_r', v, '', clause);
+      const line = Math.max(0, Math.min(1, 1.4 - v)) * Tr;
+      rec.line('T_1', 'by the straight line', '(1.4 − v) T_r ≤ T_r', line, 'N', clause);
+      const circle = Math.sqrt(Math.max(0, 1 - v * v)) * Tr;
+      rec.line('T_2', 'by the circle', '√(1 − v²) T_r', circle, 'N', clause);
+      rec.line('T_r,v', 'tension beside the shear', 'min(T_1, T_2)', left, 'N', clause);
+    }
+    return left;
   }
 
   bearing(ply: BearingPly): BearingStrength {

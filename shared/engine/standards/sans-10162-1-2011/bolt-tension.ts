@@ -11,6 +11,16 @@ export function boltTensionResistance(i: { Ab: number; fub: number }): number {
 }
 
 /**
+ * Tension that a bolt takes beside a shear, N: `T_r min(1, 1.4 - v, sqrt(1 - v^2))`, not below 0.
+ *
+ * v = V/V_r; T_r N. The straight line is the lower from v = 0.6 to 0.8, the circle elsewhere.
+ * See `shearTensionUtilisation`. SANS 10162-1:2011, 13.12.1.3.
+ */
+export function tensionBesideShear(Tr: number, v: number): number {
+  return Tr * Math.max(0, Math.min(1, 1.4 - v, Math.sqrt(Math.max(0, 1 - v * v))));
+}
+
+/**
  * Utilisation of a bolt in shear and tension together: the greatest of V/V_r, T/T_r, their sum over 1.4, and
  * the circle `sqrt((V/V_r)^2 + (T/T_r)^2)`.
  *
