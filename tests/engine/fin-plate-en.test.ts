@@ -1,4 +1,5 @@
 import { describe, expect, it } from 'vitest';
+import { oneCopeCriticalStress, twoCopesCriticalStress } from '@shared/engine/limit-states/coped-section.ts';
 import { capacities, EN, plain, prepare } from './support/fin-plate.ts';
 
 /**
@@ -132,5 +133,40 @@ describe('a long plate, EN 1993-1-8', () => {
     expect(found.PL! / 1000).toBeCloseTo(126.44, 1);
     expect(capacities(prepare(EN, long), 30).PL! / 1000).toBeCloseTo(252.87, 1);
     expect(capacities(prepare(EN, long), 0).PL).toBe(Infinity);
+  });
+});
+
+describe('the coped section of the beam, EN 1993-1-1', () => {
+  // Left 329 of a web 8.5 and a flange 180 x 13: A = 316 x 8.5 + 2340 = 5026; centroid (2686 x 158 + 2340 x 322.5)/5026
+  // = 234.588 from the coped edge; I = 22 384 056 + 2686 x 76.588^2 + 2340 x 87.912^2 = 56.224e6; Z = 239 672.
+  const shear = { ...plain, shear_line: 'support' };
+
+  it('bends under the shear from the face to the end of the cope', () => {
+    // M = 103, sigma = 0.00042976, tau = 1/(329 x 8.5) = 0.00035759: 345/0.00075386 = 457.64 kN. f = 180/390,
+    // k = 2.2 (329/90)^1.65 = 18.68, k_1 = 8.62: F_cr = 0.903 x 210 000 x 8.62/38.706^2 = 1091 MPa is above yield.
+    expect(capacities(prepare(EN, shear), -90).MC! / 1000).toBeCloseTo(457.6, 0);
+    // With the shear at the bolts the lever is 103 - 95 = 8.
+    const near = { ...plain, shear_line: 'bolts' };
+    const sigma = 8 / 239_672;
+    const byHand = 345 / Math.sqrt(sigma ** 2 + 3 / (329 * 8.5) ** 2);
+    expect(capacities(prepare(EN, near), -90).MC! / byHand).toBeCloseTo(1, 4);
+  });
+
+  it('is pulled off its centroid', () => {
+    // The bolts sit 191 below the top of the beam; the centroid 61 + 234.588: 104.588 apart.
+    const byHand = 345 / (1 / 5026 + 104.588 / 239_672);
+    expect(capacities(prepare(EN, shear), 0).MC! / byHand).toBeCloseTo(1, 4);
+  });
+
+  it('does not apply to a beam without copes', () => {
+    const whole = { ...plain, cope_top_length: 0, cope_top_depth: 0 };
+    expect(capacities(prepare(EN, whole), -90).MC).toBe(Infinity);
+  });
+
+  it('buckles at long copes: in one flange as a plate, in both as a bar', () => {
+    // One: c = 400 > h_0 = 200 and not above d = 450: f = 800/450, k = 2.2/2, k_1 = 1.956;
+    // 0.903 x 210 000 x 1.956/(200/5)^2 = 231.8 MPa. Two: 1.9 x 210 000 x 25/(400 x 200) = 124.7 MPa.
+    expect(oneCopeCriticalStress(210_000, 450, 200, 400, 5)).toBeCloseTo(231.8, 1);
+    expect(twoCopesCriticalStress(210_000, 200, 400, 5)).toBeCloseTo(124.7, 1);
   });
 });

@@ -1,4 +1,5 @@
 import type { ParameterValues } from '@shared/engine/index.ts';
+import { copePlateFactor } from '@shared/engine/limit-states/coped-section.ts';
 import { shortPlateReach } from '@shared/engine/limit-states/lateral-stability.ts';
 import { type Check, printed, type RoundedFirst, rounding, threeFigures } from '../check.ts';
 import { capacityOf, type WholeDetail } from './detail.ts';
@@ -232,5 +233,18 @@ const american: readonly Check[] = (['lrfd', 'asd'] as const).flatMap((format) =
   }),
 );
 
-/** Whole fin plates against published worked examples. */
-export const finPlates: readonly Check[] = [...european, ...american];
+const cope: Check = {
+  id: 'C-COPE-k1',
+  basis: 'aisc-360-2022-lrfd',
+  clause: 'Manual Part 9, top cope, flexural local buckling',
+  source:
+    'Companion to the AISC Steel Construction Manual, Vol. 1: Design Examples, Version 16.0, Example II.A-8, beam B',
+  evidence: 'found in text',
+  inputs: 'W21×50: d 20.8 in, cope 2 in deep and 5 in long, h_0 18.8 in',
+  published: printed('9.41'),
+  unit: '',
+  ours: () => copePlateFactor(inch(20.8), inch(18.8), inch(5)),
+};
+
+/** Whole fin plates and the beams' ends they hold, against published worked examples. */
+export const finPlates: readonly Check[] = [...european, ...american, cope];

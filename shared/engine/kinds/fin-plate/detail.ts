@@ -124,6 +124,7 @@ export class FinPlateDetail implements PreparedDetail {
     out[13] = byComponent(s.webShearNet, sin);
     out[14] = limits.webBlock(model, s, cos, sin, null);
     out[15] = byComponent(s.webTension, cos);
+    out[16] = limits.copedSection(model, cos, sin, null);
   }
 
   /** The same functions in the same order, each writing its working. */
@@ -147,6 +148,7 @@ export class FinPlateDetail implements PreparedDetail {
       (r) => byComponent(webShearNet(basis, beam, group, r), sin),
       (r) => limits.webBlock(model, s, cos, sin, r),
       (r) => byComponent(webTension(basis, beam, group, height, r), cos),
+      (r) => limits.copedSection(model, cos, sin, r),
     ];
   }
 }

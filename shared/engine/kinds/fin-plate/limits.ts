@@ -5,6 +5,7 @@ import { byBoth, byComponent } from '../../limit-states/resultant.ts';
 import { weldLineCapacity } from '../../limit-states/weld-line.ts';
 import type { ClauseKey, Rec } from '../../standards/basis.ts';
 import type { FailingPart } from '../../types.ts';
+import { copedSectionCapacity } from '../beam-end/coped-section.ts';
 import type { FinPlateModel } from './model.ts';
 import type { Strengths } from './strengths.ts';
 
@@ -43,6 +44,7 @@ export const limitStates = [
   state('web-net-shear', 'MN', 'Net shear of the web', 'member', 'shearSection'),
   state('web-block-shear', 'MX', 'Block shear in the web', 'member', 'blockShear'),
   state('web-tension', 'MT', 'Tension of the web', 'member', 'webTension'),
+  state('coped-section', 'MC', 'Coped section of the beam', 'member', 'plateSection'),
 ] as const;
 
 /** Weld metal on its worst millimetre, N. */
@@ -156,6 +158,12 @@ export function webBlock(m: FinPlateModel, s: Strengths, cos: number, sin: numbe
   const along = m.eitherWay ? s.webBlockLeast : pushedUp ? s.webBlockUp : s.webBlockDown;
   if (rec !== null) s.recordWebBlock(along === s.webBlockUp, rec);
   return blocks(along, s.webBlockAcross, cos, sin, rec);
+}
+
+/** Pull, shear and bending of the beam where its copes begin, N; Infinity where it has none. */
+export function copedSection(m: FinPlateModel, cos: number, sin: number, rec: Rec): number {
+  if (m.coped === null) return Infinity;
+  return copedSectionCapacity(m.beam, m.coped, m.lines.nearest, cos, sin, rec);
 }
 
 function blocks(along: number, across: number, cos: number, sin: number, rec: Rec): number {

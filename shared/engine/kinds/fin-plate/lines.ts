@@ -10,6 +10,8 @@ export interface Lines {
   /** Moment on the bolts about their middle, once for each line. */
   readonly boltLevers: readonly number[];
   readonly weldLever: number;
+  /** From the face of the support to the nearest line of shear. */
+  readonly nearest: number;
   /** At the column nearest to the support. */
   readonly columnLever: number;
 }
@@ -26,6 +28,7 @@ export function linesOf(values: Resolved, group: UprightGroup, firstColumn: numb
     eccentricity,
     boltLevers: [...(atSupport ? [-eccentricity] : []), ...(atBolts ? [0] : [])],
     weldLever: atBolts ? eccentricity : 0,
+    nearest: atSupport ? 0 : eccentricity,
     columnLever: Math.max(atSupport ? eccentricity - half : 0, atBolts ? half : 0),
   };
 }

@@ -17,6 +17,7 @@ import type {
   HoleMaking,
 } from '../../standards/basis.ts';
 import { type BeamEnd, beamEndOf } from '../beam-end/beam.ts';
+import { type CopedSection, copedSectionOf } from '../beam-end/coped-section.ts';
 import { isUsed } from '../given.ts';
 import { boltOf, noGrade, normalHole, noSteel, plateOf, weldedParts, type WeldedPlate } from '../parts.ts';
 import type { Resolved } from '../resolved.ts';
@@ -58,6 +59,8 @@ export interface FinPlateModel extends WeldedPlate {
   readonly ply: UprightPly;
   readonly net: NetSection;
   readonly beam: BeamEnd;
+  /** Null where the beam has no cope. */
+  readonly coped: CopedSection | null;
   readonly plateBearing: GroupBearing;
   readonly webBearing: GroupBearing;
   readonly forces: UprightForces;
@@ -110,6 +113,7 @@ export function buildModel(values: Resolved, basis: Basis): FinPlateModel {
     ply: { thickness, deduction, fy, fu },
     net: netSectionOf(thickness, height, group.rows, group.pitch, deduction),
     beam,
+    coped: copedSectionOf(basis, beam),
     plateBearing: bearingOf(lap, thickness, fu, plateEdges),
     webBearing: bearingOf(lap, beam.web.thickness, beam.steel.fu, beam.edges),
     forces: new UprightForces(group),

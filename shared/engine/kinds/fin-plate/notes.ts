@@ -1,4 +1,4 @@
-import { beamNotes } from '../beam-end/notes.ts';
+import { beamNotesWithCope } from '../beam-end/notes.ts';
 import type { FinPlateModel } from './model.ts';
 
 /** What the kind assumes; printed on every sheet and export. */
@@ -14,7 +14,7 @@ export const notes: readonly string[] = [
   'A plate is long where the first column is farther from the face than t/0.15 (Steel Buildings in Europe, Part 5). It then carries what the buckling curve of the basis for struts leaves of its elastic moment, for an even moment between weld and bolts (errs low); the extended single plates of American practice are checked the same way.',
   'The plate is not thicker than half a bolt and at least 0.6 of the depth of the beam high, unless the family waives the rules of practice (Steel Buildings in Europe, Part 5).',
   'A full-strength weld is as strong across the plate as the plate yields. The support is covered only as the base metal at the weld.',
-  ...beamNotes,
+  ...beamNotesWithCope,
 ];
 
 const waivedFit =
