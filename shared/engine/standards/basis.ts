@@ -38,7 +38,8 @@ export type ClauseKey =
   | 'shearSection'
   | 'webTension'
   | 'boltTension'
-  | 'boltCombined';
+  | 'boltCombined'
+  | 'tStub';
 
 /** One bolt in shear. mm, mm2, MPa. */
 export interface BoltInShear {
@@ -59,6 +60,28 @@ export interface BoltInTension {
   readonly headDiameter: number;
   readonly plateThickness: number;
   readonly plateFu: number;
+}
+
+/** An equivalent T-stub: a flange pulled off its support by bolts on both sides of a web. mm, MPa. */
+export interface TStub {
+  readonly thickness: number;
+  readonly steel: Steel;
+  /** Bending by tensile strength instead of yield, where the basis's practice has both. */
+  readonly byTensile: boolean;
+  readonly bolt: BoltSize;
+  readonly bolts: number;
+  readonly holeDiameter: number;
+  /** Bolt line to the web's face, or to the middle of the standing leg of an angle. */
+  readonly boltToWeb: number;
+  /** Bolt line to the yield line: 0.8 of the root radius or of the weld's leg nearer than the web. */
+  readonly m: number;
+  /** Bolt line to the free edge. */
+  readonly edge: number;
+  /** Effective lengths of the whole stub for modes 1 and 2. */
+  readonly leff1: number;
+  readonly leff2: number;
+  /** Length of flange for one bolt. */
+  readonly tributary: number;
 }
 
 /** The ply that a bolt bears on. */
@@ -181,6 +204,11 @@ export interface Basis {
    * shear over shear strength of that bolt: 0 gives `tension` back. The shear strength itself is a check of its own.
    */
   tensionWithShear(tension: number, shearRatio: number, rec: Rec): number;
+  /**
+   * Pull that a T-stub carries when each of its bolts may take `boltTension`, prying included, N. It never falls when
+   * the bolt or the flange is stronger.
+   */
+  tStub(stub: TStub, boltTension: number, rec: Rec): number;
   bearing(ply: BearingPly): BearingStrength;
   /** Strength of a group in bearing from that of its bolts, N: number, least, greatest, sum, shear of one bolt. */
   bearingGroup(count: number, least: number, most: number, sum: number, boltShear: number, rec: Rec): number;

@@ -14,7 +14,9 @@ import type {
   FilletSpec,
   FilletStrength,
   Rec,
+  TStub,
 } from '../basis.ts';
+import { pryingStub } from '../prying.ts';
 import { AiscBearing } from './bearing.ts';
 import { nominalBlockShear, uniformity } from './block-shear.ts';
 import { longJointFactor, nominalBoltShear, stressesOf } from './bolt-shear.ts';
@@ -48,6 +50,7 @@ const clauses: Readonly<Record<ClauseKey, string>> = {
   webTension: 'AISC 360 J4.1',
   boltTension: 'AISC 360 J3.7',
   boltCombined: 'AISC 360 J3.8',
+  tStub: 'AISC Manual Part 9, prying',
 };
 
 /** ANSI/AISC 360-22 in one of its formats. Its factors are part of the standard, so a firm's are not used. */
@@ -131,6 +134,13 @@ class AiscBasis implements Basis {
       rec.line('r_t,v', 'tension beside the shear', '(1.3 − v) r_t ≤ r_t', left, 'N', clause);
     }
     return left;
+  }
+
+  tStub(stub: TStub, boltTension: number, rec: Rec): number {
+    const stress = stub.byTensile ? stub.steel.fu : stub.steel.fy;
+    const bending = this.ofYielding * stress;
+    const text = `${stub.byTensile ? 'F_u' : 'F_y'} ${this.format.text(yielding)}`;
+    return pryingStub(stub, bending, text, boltTension, clauses.tStub, rec);
   }
 
   bearing(ply: BearingPly): BearingStrength {

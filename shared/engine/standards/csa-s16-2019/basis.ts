@@ -15,7 +15,9 @@ import type {
   FilletStrength,
   HoleMaking,
   Rec,
+  TStub,
 } from '../basis.ts';
+import { pryingStub } from '../prying.ts';
 import { CsaBearing } from './bearing.ts';
 import { blockResistance, tensionEfficiency } from './block-shear.ts';
 import { boltShearResistance, shearCoefficient } from './bolt-shear.ts';
@@ -43,6 +45,7 @@ const clauses: Readonly<Record<ClauseKey, string>> = {
   webTension: 'CSA S16 13.2',
   boltTension: 'CSA S16 13.12.1.3',
   boltCombined: 'CSA S16 13.12.1.4',
+  tStub: 'CSA S16 22.2.3, published prying method',
 };
 
 /** CSA S16:19. Resistance factors are part of the standard, so a firm's partial factors are not used. */
@@ -110,6 +113,13 @@ class CsaBasis implements Basis {
       rec.line('T_r,v', 'tension beside the shear', '√(1 − v²) T_r', left, 'N', clause);
     }
     return left;
+  }
+
+  tStub(stub: TStub, boltTension: number, rec: Rec): number {
+    const { fy, fu } = stub.steel;
+    const bending = phi * (stub.byTensile ? fu : fy);
+    const text = stub.byTensile ? 'φ f_u' : 'φ f_y';
+    return pryingStub(stub, bending, text, boltTension, clauses.tStub, rec);
   }
 
   bearing(ply: BearingPly): BearingStrength {

@@ -49,6 +49,11 @@ export const info: BasisInfo = {
       clause: 'EN 1993-1-8 4.5.3',
     },
     {
+      id: 'prying',
+      text: 'T-stubs take the least of modes 1, 2 and 3 by method 1 without backing plates; prying is taken to develop whatever the length of the bolts. Beside shear a bolt keeps min(1, 1.4 (1 − F_v/F_v,Rd)) of its tension for the stub. A family may ask for the tying resistance instead, with f_u/1.10 in bending as handbooks of simple connections take it.',
+      clause: 'EN 1993-1-8 6.2.4, Table 3.4',
+    },
+    {
       id: 'curve',
       text: 'Plates in compression are solid sections on buckling curve c.',
       clause: 'EN 1993-1-1 Table 6.2',

@@ -15,7 +15,9 @@ import type {
   FilletStrength,
   HoleMaking,
   Rec,
+  TStub,
 } from '../basis.ts';
+import { pryingStub } from '../prying.ts';
 import { SansBearing } from './bearing.ts';
 import { blockTearing } from './block-shear.ts';
 import { boltShearResistance, longJointFactor } from './bolt-shear.ts';
@@ -43,6 +45,7 @@ const clauses: Readonly<Record<ClauseKey, string>> = {
   webTension: 'SANS 10162-1 13.2',
   boltTension: 'SANS 10162-1 13.12.1.2',
   boltCombined: 'SANS 10162-1 13.12.1.3',
+  tStub: 'SANS 10162-1 22.2.3, published prying method',
 };
 
 /** SANS 10162-1:2011. Resistance factors are part of the standard, so a firm's partial factors are not used. */
@@ -115,6 +118,13 @@ class SansBasis implements Basis {
       rec.line('T_r,v', 'tension beside the shear', 'min(T_1, T_2)', left, 'N', clause);
     }
     return left;
+  }
+
+  tStub(stub: TStub, boltTension: number, rec: Rec): number {
+    const { fy, fu } = stub.steel;
+    const bending = phi * (stub.byTensile ? fu : fy);
+    const text = stub.byTensile ? 'φ f_u' : 'φ f_y';
+    return pryingStub(stub, bending, text, boltTension, clauses.tStub, rec);
   }
 
   bearing(ply: BearingPly): BearingStrength {

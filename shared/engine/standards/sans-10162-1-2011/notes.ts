@@ -53,5 +53,10 @@ export const info: BasisInfo = {
       text: 'Plates in compression use n = 1.34.',
       clause: 'SANS 10162-1 13.3.1',
     },
+    {
+      id: 'prying',
+      text: 'Prying by the published method of b, a, ρ and δ. Recent practice bends the plate with its tensile strength, older practice with its yield strength: the family says which, and yield, the lower, is the default. Beside shear a bolt keeps the lower of the straight line 1.4 − V/V_r and the circle.',
+      clause: 'SANS 10162-1 22.2.3 (from memory), published method',
+    },
   ],
 };
