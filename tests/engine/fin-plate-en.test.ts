@@ -120,6 +120,9 @@ describe('a fin plate by hand, EN 1993-1-8', () => {
   it('pull on the web over the height of the plate', () => {
     // 236 x 8.5 = 2006 x 345 = 692.1; (236 - 72) 8.5 = 1394 x 0.9 x 460/1.25 = 461.7 kN.
     expect(capacities(prepare(EN, plain), 0).MT! / 1000).toBeCloseTo(461.69, 1);
+    // At 60 degrees beside the net shear of 464.14: 1/sqrt((0.5/461.69)^2 + (0.86603/464.14)^2) = 463.5 kN.
+    expect(capacities(prepare(EN, plain), 60).MT! / 1000).toBeCloseTo(463.5, 1);
+    expect(found.MT).toBe(Infinity);
   });
 });
 

@@ -13,7 +13,7 @@ import {
   type Sense,
   type SheetSection,
 } from '../../types.ts';
-import { webShearGross, webShearNet, webTension } from '../beam-end/strengths.ts';
+import { webShearGross, webShearNet } from '../beam-end/strengths.ts';
 import {
   governing,
   recordLimitStates,
@@ -123,14 +123,14 @@ export class FinPlateDetail implements PreparedDetail {
     out[12] = byComponent(s.webShearGross, sin);
     out[13] = byComponent(s.webShearNet, sin);
     out[14] = limits.webBlock(model, s, cos, sin, null);
-    out[15] = byComponent(s.webTension, cos);
+    out[15] = limits.webPull(model, s, cos, sin, null);
     out[16] = limits.copedSection(model, cos, sin, null);
   }
 
   /** The same functions in the same order, each writing its working. */
   private work(cos: number, sin: number): readonly ((rec: Rec) => number)[] {
     const { model, strengths: s } = this;
-    const { basis, beam, group, height } = model;
+    const { basis, beam, group } = model;
     return [
       (r) => limits.weldMetal(model, cos, sin, r),
       (r) => limits.weldBaseMetal(model, cos, sin, r),
@@ -147,7 +147,7 @@ export class FinPlateDetail implements PreparedDetail {
       (r) => byComponent(webShearGross(basis, beam, r), sin),
       (r) => byComponent(webShearNet(basis, beam, group, r), sin),
       (r) => limits.webBlock(model, s, cos, sin, r),
-      (r) => byComponent(webTension(basis, beam, group, height, r), cos),
+      (r) => limits.webPull(model, s, cos, sin, r),
       (r) => limits.copedSection(model, cos, sin, r),
     ];
   }

@@ -6,6 +6,7 @@ import { weldLineCapacity } from '../../limit-states/weld-line.ts';
 import type { ClauseKey, Rec } from '../../standards/basis.ts';
 import type { FailingPart } from '../../types.ts';
 import { copedSectionCapacity } from '../beam-end/coped-section.ts';
+import { webTension } from '../beam-end/strengths.ts';
 import type { FinPlateModel } from './model.ts';
 import type { Strengths } from './strengths.ts';
 
@@ -43,7 +44,7 @@ export const limitStates = [
   state('web-gross-shear', 'MV', 'Gross shear of the web', 'member', 'shearSection'),
   state('web-net-shear', 'MN', 'Net shear of the web', 'member', 'shearSection'),
   state('web-block-shear', 'MX', 'Block shear in the web', 'member', 'blockShear'),
-  state('web-tension', 'MT', 'Tension of the web', 'member', 'webTension'),
+  state('web-tension', 'MT', 'Tension of the web with its shear', 'member', 'webTension'),
   state('coped-section', 'MC', 'Coped section of the beam', 'member', 'plateSection'),
 ] as const;
 
@@ -158,6 +159,19 @@ export function webBlock(m: FinPlateModel, s: Strengths, cos: number, sin: numbe
   const along = m.eitherWay ? s.webBlockLeast : pushedUp ? s.webBlockUp : s.webBlockDown;
   if (rec !== null) s.recordWebBlock(along === s.webBlockUp, rec);
   return blocks(along, s.webBlockAcross, cos, sin, rec);
+}
+
+/** Pull on the web beside its shear, as the root of the sum of squares, N; Infinity where nothing pulls. */
+export function webPull(m: FinPlateModel, s: Strengths, cos: number, sin: number, rec: Rec): number {
+  if (cos === 0) return Infinity;
+  const shear = Math.min(s.webShearGross, s.webShearNet);
+  if (rec !== null) {
+    webTension(m.basis, m.beam, m.group, m.height, rec);
+    rec.line('V_r', 'the web in shear, gross or net', 'the lesser', shear, 'N', '');
+    const meaning = 'as the root of the sum of squares';
+    rec.line('', 'together', '√((V/V_r)² + (N/N_r)²) ≤ 1', meaning, '', 'method of this catalogue');
+  }
+  return byBoth(shear, s.webTension, cos, sin);
 }
 
 /** Pull, shear and bending of the beam where its copes begin, N; Infinity where it has none. */
