@@ -45,7 +45,7 @@ const clauses: Readonly<Record<ClauseKey, string>> = {
   webTension: 'CSA S16 13.2',
   boltTension: 'CSA S16 13.12.1.3',
   boltCombined: 'CSA S16 13.12.1.4',
-  tStub: 'CSA S16 22.2.3, published prying method',
+  tStub: 'CSA S16 13.12.1.3, CISC Handbook Part 3',
 };
 
 /** CSA S16:19. Resistance factors are part of the standard, so a firm's partial factors are not used. */

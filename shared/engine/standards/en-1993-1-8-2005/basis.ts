@@ -26,7 +26,7 @@ import { EnFillet } from './fillet-weld.ts';
 import { info } from './notes.ts';
 import { angleByOneLeg, equalAngleArea, grossYield, netSectionResistance } from './tension-member.ts';
 import { shearRupture, shearYield } from './shear-section.ts';
-import { tStubResistance } from './t-stub.ts';
+import { tStubResistance, tyingFactor } from './t-stub.ts';
 
 const clauses: Readonly<Record<ClauseKey, string>> = {
   filletMetal: 'EN 1993-1-8 4.5.3',
@@ -45,9 +45,6 @@ const clauses: Readonly<Record<ClauseKey, string>> = {
   boltCombined: 'EN 1993-1-8 Table 3.4',
   tStub: 'EN 1993-1-8 6.2.4, Table 6.2',
 };
-
-/** γ_Mu of handbooks of simple connections, for plates that may deform largely under an accidental tying force. */
-const TYING_FACTOR = 1.1;
 
 /** EN 1993-1-8:2005 with EN 1993-1-1:2005, with a firm's partial factors. */
 class EnBasis implements Basis {
@@ -123,23 +120,9 @@ class EnBasis implements Basis {
   }
 
   tStub(stub: TStub, boltTension: number, rec: Rec): number {
-    const { m, edge: e, leff1, leff2, thickness: t, steel, bolts } = stub;
-    const sumFt = bolts * boltTension;
-    const [fy, gammaM0] = stub.byTensile ? [steel.fu, TYING_FACTOR] : [steel.fy, this.factors.gammaM0];
-    const { mode1, mode2, mode3 } = tStubResistance({ m, e, leff1, leff2, t, fy, gammaM0, sumFt });
-    if (rec !== null) {
-      const clause = clauses.tStub;
-      if (stub.byTensile) rec.line('f_u/γ_Mu', 'tying, large deformations', '', fy / gammaM0, 'MPa', clause);
-      rec.line('m', 'bolt line to the yield line', '', m, 'mm', clause);
-      rec.line('n', 'lever of prying', 'min(e, 1.25 m)', Math.min(e, 1.25 * m), 'mm', clause);
-      rec.line('Σl_eff,1', 'effective length, mode 1', '', leff1, 'mm', 'EN 1993-1-8 Table 6.4');
-      rec.line('Σl_eff,2', 'effective length, mode 2', '', leff2, 'mm', 'EN 1993-1-8 Table 6.4');
-      rec.line('ΣF_t,Rd', 'all bolts', `${bolts} bolts`, sumFt, 'N', clause);
-      rec.line('F_T,1,Rd', 'mode 1, the plate yields', '4 M_pl,1,Rd/m', mode1, 'N', clause);
-      rec.line('F_T,2,Rd', 'mode 2, both', '(2 M_pl,2,Rd + n ΣF_t,Rd)/(m + n)', mode2, 'N', clause);
-      rec.line('F_T,3,Rd', 'mode 3, the bolts', 'ΣF_t,Rd', mode3, 'N', clause);
-    }
-    return Math.min(mode1, mode2, mode3);
+    const { fy, fu } = stub.steel;
+    const bending = stub.byTensile ? fu / tyingFactor : fy / this.factors.gammaM0;
+    return tStubResistance(stub, bending, boltTension, rec);
   }
 
   bearing(ply: BearingPly): BearingStrength {

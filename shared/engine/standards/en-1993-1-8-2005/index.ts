@@ -16,4 +16,13 @@ export {
   netSectionResistance,
   oneLegReduction,
 } from './tension-member.ts';
+export {
+  boltsWithFlange,
+  flangeYield,
+  longestPryingBolt,
+  plasticMoment,
+  pryingLever,
+  tStubResistance,
+  tyingFactor,
+} from './t-stub.ts';
 export { en199318 } from './basis.ts';

@@ -45,7 +45,7 @@ const clauses: Readonly<Record<ClauseKey, string>> = {
   webTension: 'SANS 10162-1 13.2',
   boltTension: 'SANS 10162-1 13.12.1.2',
   boltCombined: 'SANS 10162-1 13.12.1.3',
-  tStub: 'SANS 10162-1 22.2.3, published prying method',
+  tStub: 'SANS 10162-1 13.12.1.2, published prying method',
 };
 
 /** SANS 10162-1:2011. Resistance factors are part of the standard, so a firm's partial factors are not used. */

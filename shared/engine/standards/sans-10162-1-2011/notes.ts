@@ -56,7 +56,7 @@ export const info: BasisInfo = {
     {
       id: 'prying',
       text: 'Prying by the published method of b, a, ρ and δ. Recent practice bends the plate with its tensile strength, older practice with its yield strength: the family says which, and yield, the lower, is the default. Beside shear a bolt keeps the lower of the straight line 1.4 − V/V_r and the circle.',
-      clause: 'SANS 10162-1 22.2.3 (from memory), published method',
+      clause: 'SANS 10162-1 13.12.1.2, 13.12.1.3, published method',
     },
   ],
 };
