@@ -3,10 +3,12 @@ import { finPlates } from './details/fin-plate.ts';
 import { gussetPlates } from './details/gusset-plate.ts';
 import { enBearingTables } from './en/bearing-tables.ts';
 import { enBolts } from './en/bolts.ts';
+import { enTension } from './en/tension.ts';
 import { enWelds } from './en/welds.ts';
 import { enWorkedExamples } from './en/worked-examples.ts';
 import { sansRuleEvaluations } from './sans/rule-evaluations.ts';
 import { sansSameExpression } from './sans/same-expression.ts';
+import { sansTension } from './sans/tension.ts';
 
 /** Every comparison of the engine with a value from outside it. */
 export const checks: readonly Check[] = [
@@ -14,8 +16,10 @@ export const checks: readonly Check[] = [
   ...enBearingTables,
   ...enWorkedExamples,
   ...enWelds,
+  ...enTension,
   ...sansSameExpression,
   ...sansRuleEvaluations,
+  ...sansTension,
   ...gussetPlates,
   ...finPlates,
 ];

@@ -118,7 +118,7 @@ class CsaBasis implements Basis {
   tStub(stub: TStub, boltTension: number, rec: Rec): number {
     const { fy, fu } = stub.steel;
     const bending = phi * (stub.byTensile ? fu : fy);
-    const text = stub.byTensile ? 'φ f_u' : 'φ f_y';
+    const text = stub.byTensile ? 'φ F_u, φ = 0.90' : 'φ F_y, φ = 0.90';
     return pryingStub(stub, bending, text, boltTension, clauses.tStub, rec);
   }
 

@@ -5,5 +5,6 @@ export { boltTensionResistance, shearTensionUtilisation, tensionBesideShear } fr
 export { compressionResistance, slenderness } from './compression.ts';
 export { detailing, greatestHole, leastEdgeDistance, leastFilletLeg } from './detailing.ts';
 export { angleIncrease, filletBaseMetal, filletWeldMetal, multiOrientationFactor } from './fillet-weld.ts';
+export { shearRupture, shearYield } from './shear-section.ts';
 export { grossYield, netSectionResistance, oneLegFactor, sideWeldedWidth } from './tension-member.ts';
 export { csaS16 } from './basis.ts';

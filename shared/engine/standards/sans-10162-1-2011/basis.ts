@@ -123,7 +123,7 @@ class SansBasis implements Basis {
   tStub(stub: TStub, boltTension: number, rec: Rec): number {
     const { fy, fu } = stub.steel;
     const bending = phi * (stub.byTensile ? fu : fy);
-    const text = stub.byTensile ? 'φ f_u' : 'φ f_y';
+    const text = stub.byTensile ? 'φ f_u, φ = 0.90' : 'φ f_y, φ = 0.90';
     return pryingStub(stub, bending, text, boltTension, clauses.tStub, rec);
   }
 

@@ -5,5 +5,6 @@ export { boltTensionResistance, shearTensionUtilisation, tensionBesideShear } fr
 export { compressionResistance, slenderness } from './compression.ts';
 export { leastEdgeDistance, leastFilletLeg } from './detailing.ts';
 export { angleIncrease, filletBaseMetal, filletWeldMetal } from './fillet-weld.ts';
+export { shearRupture, shearYield } from './shear-section.ts';
 export { grossYield, netSectionResistance, oneLegFactor } from './tension-member.ts';
 export { sans101621 } from './basis.ts';
