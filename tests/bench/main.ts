@@ -1,0 +1,3 @@
+import { benchSpreadsheet } from './spreadsheet.ts';
+
+benchSpreadsheet();
