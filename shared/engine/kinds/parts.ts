@@ -29,11 +29,17 @@ export function plateOf(values: Resolved): WeldedPlate {
 /** The plate between its two fillets, and the support under each. */
 export function weldedParts(plate: WeldedPlate): readonly FilletPart[] {
   const { thickness, supportThickness } = plate;
-  return [
-    { ...plate.plate, thickness, fillets: 2 },
-    { ...plate.support, thickness: supportThickness <= TOLERANCE ? thickness : supportThickness, fillets: 1 },
-  ];
+  const behind = supportThickness <= TOLERANCE ? thickness : supportThickness;
+  return [weldedPart(plate.plate, thickness, 2), weldedPart(plate.support, behind, 1)];
 }
+
+const weldedPart = ({ name, fy, fu }: Steel, thickness: number, fillets: number): FilletPart => ({
+  name,
+  fy,
+  fu,
+  thickness,
+  fillets,
+});
 
 /** The normal round hole of the basis for the chosen bolt, mm, or null where it lists none. */
 export function normalHole(values: Resolved, basis: Basis): number | null {

@@ -13,18 +13,16 @@ export interface Rule {
   readonly least: boolean;
 }
 
-/** A rule of a kind's list with the clause that its basis gives. */
-export function ruleFrom<Id extends string>(
+/** Gives the rules of a kind's list with the clause that its basis has for them. Called for every variant of a sweep. */
+export function rulesOf<Id extends string>(
   list: readonly { readonly id: Id; readonly subject: string; readonly title: string }[],
-  id: Id,
-  clause: string,
-  unit: string,
-  least = true,
-): Rule {
-  const entry = list.find((one) => one.id === id);
-  if (entry === undefined) throw new Error(`The list has no rule ${id}`);
-  const { subject, title } = entry;
-  return { id, subject, title, clause, unit, least };
+): (id: Id, clause: string, unit: string, least?: boolean) => Rule {
+  const byId = new Map(list.map((entry) => [entry.id, entry]));
+  return (id, clause, unit, least = true) => {
+    const entry = byId.get(id);
+    if (entry === undefined) throw new Error(`The list has no rule ${id}`);
+    return { id, subject: entry.subject, title: entry.title, clause, unit, least };
+  };
 }
 
 /** Lengths that differ by less are equal: a given 54.0 meets a limit of 2.7 x 20. mm. */

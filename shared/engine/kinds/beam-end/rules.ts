@@ -1,6 +1,6 @@
 import type { Basis, EdgeFinish } from '../../standards/basis.ts';
-import type { Rejections, Rule } from '../rules.ts';
-import { ruleFrom } from '../rules.ts';
+import type { Rejections } from '../rules.ts';
+import { rulesOf } from '../rules.ts';
 import { type BeamEnd, isCoped } from './beam.ts';
 import { type BeamRuleId, beamRules } from './rule-list.ts';
 
@@ -31,8 +31,7 @@ export interface BeamRuleSetting {
   readonly fitWaived: boolean;
 }
 
-const ruleOf = (id: BeamRuleId, clause: string, unit: string, least = true): Rule =>
-  ruleFrom(beamRules, id, clause, unit, least);
+const ruleOf = rulesOf<BeamRuleId>(beamRules);
 
 /** Checks the beam's end: its copes, its bolts inside the web, and the bolted part between its fillets. */
 export function checkBeamEnd(s: BeamRuleSetting, found: Rejections): void {

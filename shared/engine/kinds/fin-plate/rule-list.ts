@@ -1,5 +1,5 @@
 import { beamRules } from '../beam-end/rule-list.ts';
-import { type Rule, ruleFrom } from '../rules.ts';
+import { rulesOf } from '../rules.ts';
 
 const rule = <Id extends string>(id: Id, subject: string, title: string) => ({ id, subject, title });
 
@@ -41,6 +41,4 @@ export type RuleId = (typeof list)[number]['id'];
 export const rules = list.map(({ id, title }) => ({ id, title }));
 
 /** A rule of the kind with the clause that its basis gives. */
-export function ruleOf(id: RuleId, clause: string, unit: string, least = true): Rule {
-  return ruleFrom<RuleId>(list, id, clause, unit, least);
-}
+export const ruleOf = rulesOf<RuleId>(list);

@@ -80,7 +80,10 @@ export function memberOf(values: Resolved, deduction: number, noSteel: Steel): G
   const toeDistance = legs.connectedLeg - backmark - (linesEach - 1) * gauge;
   const parts = brace === 'back_to_back' || brace === 'star' ? 2 : 1;
   return {
-    ...legs,
+    connectedLeg: legs.connectedLeg,
+    otherLeg: legs.otherLeg,
+    rootRadius: legs.rootRadius,
+    centroid: legs.centroid,
     brace,
     section,
     steel,

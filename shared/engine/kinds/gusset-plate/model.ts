@@ -3,6 +3,7 @@ import type { BlockPly } from '../../limit-states/block-shear.ts';
 import type { InclinedGroup } from '../../limit-states/bearing.ts';
 import type {
   Basis,
+  BearingPly,
   BearingStrength,
   BoltInShear,
   EdgeFinish,
@@ -86,20 +87,36 @@ export function buildModel(values: Resolved, basis: Basis): GussetModel {
   const { fy, fu } = plate.plate;
   const halfHeight = weldLength / 2;
   const { rows, lines, gauge } = layout;
-  const lap = {
-    ...bolt,
+  const boltShear = basis.boltShear(bolt, null);
+  // Spelled out, as is the model itself: copying whole objects is most of the work of a variant in a sweep.
+  const ply = (thickness: number, fu: number): BearingPly => ({
+    size: bolt.size,
+    grade: bolt.grade,
+    holeDiameter: bolt.holeDiameter,
     normalHole: normalHole(values, basis) ?? bolt.holeDiameter,
-    boltShear: basis.boltShear(bolt, null),
-    deformationMatters: values.choice('hole_deformation') === 'limited',
+    thickness,
+    fu,
     singleLapOneRow: bolt.planes === 1 && rows === 1,
-  };
+    boltShear,
+    deformationMatters: values.choice('hole_deformation') === 'limited',
+  });
   const projection = values.number('projection');
   const offset = values.number('work_line_offset');
   return {
-    ...plate,
-    ...layout,
     values,
     basis,
+    thickness,
+    plate: plate.plate,
+    support: plate.support,
+    supportThickness: plate.supportThickness,
+    rows,
+    lines,
+    pitch: layout.pitch,
+    gauge,
+    halfGauge: layout.halfGauge,
+    firstRow: layout.firstRow,
+    lastRow: layout.lastRow,
+    spread: layout.spread,
     missing: {
       plate: plate.plate === noSteel,
       support: plate.support === noSteel,
@@ -124,12 +141,22 @@ export function buildModel(values: Resolved, basis: Basis): GussetModel {
     fitWaived: values.choice('fit_checks') === 'waived',
     member,
     fillet,
-    plateBearing: basis.bearing({ ...lap, thickness, fu }),
-    memberBearing: basis.bearing({ ...lap, thickness: member.bearingThickness, fu: member.steel.fu }),
+    plateBearing: basis.bearing(ply(thickness, fu)),
+    memberBearing: basis.bearing(ply(member.bearingThickness, member.steel.fu)),
     plateBlock: { thickness, deduction, fy, fu, rows, lines, gauge, angle: false },
-    inclined: { ...layout, offset, projection, halfHeight },
+    inclined: inclinedGroup(layout, offset, projection, halfHeight),
     shares: new Float64Array(rows * lines),
   };
+}
+
+function inclinedGroup(
+  layout: ReturnType<typeof layoutOf>,
+  offset: number,
+  projection: number,
+  halfHeight: number,
+): InclinedGroup {
+  const { rows, lines, pitch, gauge, firstRow } = layout;
+  return { rows, lines, pitch, gauge, firstRow, offset, projection, halfHeight };
 }
 
 function layoutOf(values: Resolved) {

@@ -1,4 +1,4 @@
-import type { Rule } from '../rules.ts';
+import { rulesOf } from '../rules.ts';
 
 const rule = <Id extends string>(id: Id, subject: string, title: string) => ({ id, subject, title });
 
@@ -58,8 +58,4 @@ export type RuleId = (typeof list)[number]['id'];
 export const rules = list.map(({ id, title }) => ({ id, title }));
 
 /** A rule of the kind with the clause that its basis gives. */
-export function ruleOf(id: RuleId, clause: string, unit: string, least = true): Rule {
-  const entry = list.find((one) => one.id === id);
-  if (entry === undefined) throw new Error(`The list has no rule ${id}`);
-  return { ...entry, clause, unit, least };
-}
+export const ruleOf = rulesOf<RuleId>(list);
