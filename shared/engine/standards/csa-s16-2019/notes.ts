@@ -64,6 +64,11 @@ export const info: BasisInfo = {
       clause: 'CSA S16 13.3.1',
     },
     {
+      id: 'shear-section',
+      text: 'Plates and webs in shear take 0.60 φ F_y on the gross section, not the 0.66 of a rolled web, and besides 0.60 φ_u F_u on the net section with φ_u = 0.75.',
+      clause: 'CSA S16 13.4, 13.11',
+    },
+    {
       id: 'prying',
       text: 'Prying by the published method of b, a, ρ and δ. Recent practice bends the plate with its tensile strength, older practice with its yield strength: the family says which, and yield, the lower, is the default. Beside shear a bolt keeps the circle √(1 − (V_f/V_r)²) of its tension.',
       clause: 'CSA S16 13.12.1.3, 13.12.1.4, CISC Handbook Part 3',

@@ -49,6 +49,11 @@ export const info: BasisInfo = {
       clause: 'EN 1993-1-8 4.5.3',
     },
     {
+      id: 'shear-section',
+      text: 'Net sections in shear take f_u/(√3 γ_M2), as handbooks of simple connections do. Their 1.27 on gross shear is not in the standard: the family says whether it is taken.',
+      clause: 'EN 1993-1-1 6.2.6',
+    },
+    {
       id: 'prying',
       text: 'T-stubs take the least of modes 1, 2 and 3 by method 1 without backing plates; prying is taken to develop, and the sheet prints the bolt length L_b* up to which it does: with longer bolts a thick plate lifts off first and carries not more than 2 M_pl,1,Rd/m, half of mode 1. Beside shear a bolt keeps min(1, 1.4 (1 − F_v/F_v,Rd)) of its tension for the stub, taken of B_p,Rd where punching is the lesser. A family may ask for the tying resistance instead, with f_u/1.10 in bending as handbooks of simple connections take it.',
       clause: 'EN 1993-1-8 6.2.4, Table 3.4',

@@ -54,6 +54,11 @@ export const info: BasisInfo = {
       clause: 'SANS 10162-1 13.3.1',
     },
     {
+      id: 'shear-section',
+      text: 'Plates and webs in shear take 0.60 f_y on the gross and 0.60 f_u on the net section, both with φ = 0.90, as the shear plane of a block does; 0.66 f_y of a rolled web is not used.',
+      clause: 'SANS 10162-1 13.4, 13.11',
+    },
+    {
       id: 'prying',
       text: 'Prying by the published method of b, a, ρ and δ. Recent practice bends the plate with its tensile strength, older practice with its yield strength: the family says which, and yield, the lower, is the default. Beside shear a bolt keeps the lower of the straight line 1.4 − V/V_r and the circle.',
       clause: 'SANS 10162-1 13.12.1.2, 13.12.1.3, published method',
