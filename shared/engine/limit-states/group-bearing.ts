@@ -36,18 +36,30 @@ export class GroupBearing {
     private readonly boltShear: number,
     private readonly leastChosen: boolean,
   ) {
-    this.away = this.strengths((row, column) => this.levelStrength(row, column, 1, null));
-    this.towards = this.strengths((row, column) => this.levelStrength(row, column, -1, null));
-    this.up = this.strengths((row, column) => this.uprightStrength(row, column, 1, null));
-    this.down = this.strengths((row, column) => this.uprightStrength(row, column, -1, null));
-    const all = [this.away, this.towards, this.up, this.down];
-    const most = Math.max(...all.map((strengths) => Math.max(...strengths)));
+    const count = group.rows * group.columns;
+    this.away = new Float64Array(count);
+    this.towards = new Float64Array(count);
+    this.up = new Float64Array(count);
+    this.down = new Float64Array(count);
+    for (let bolt = 0; bolt < count; bolt++) {
+      const row = Math.floor(bolt / group.columns);
+      const column = bolt % group.columns;
+      this.away[bolt] = this.levelStrength(row, column, 1, null);
+      this.towards[bolt] = this.levelStrength(row, column, -1, null);
+      this.up[bolt] = this.uprightStrength(row, column, 1, null);
+      this.down[bolt] = this.uprightStrength(row, column, -1, null);
+    }
+    const most = Math.max(
+      greatest(this.away),
+      greatest(this.towards),
+      greatest(this.up),
+      greatest(this.down),
+    );
     this.leastThroughout = leastChosen || basis.leastBearingThroughout(most, boltShear);
-    if (this.leastThroughout) for (const strengths of all) strengths.fill(Math.min(...strengths));
-    this.perAway = this.away.map(inverse);
-    this.perTowards = this.towards.map(inverse);
-    this.perUp = this.up.map(inverse);
-    this.perDown = this.down.map(inverse);
+    this.perAway = this.inverses(this.away);
+    this.perTowards = this.inverses(this.towards);
+    this.perUp = this.inverses(this.up);
+    this.perDown = this.inverses(this.down);
   }
 
   /**
@@ -75,11 +87,12 @@ export class GroupBearing {
     return ux * ux + uy * uy;
   }
 
-  private strengths(of: (row: number, column: number) => number): Float64Array {
-    const { rows, columns } = this.group;
-    return Float64Array.from({ length: rows * columns }, (_, bolt) =>
-      of(Math.floor(bolt / columns), bolt % columns),
-    );
+  /** One over each strength; first the least is put in place of all where it is used throughout. */
+  private inverses(strengths: Float64Array): Float64Array {
+    if (this.leastThroughout) strengths.fill(least(strengths));
+    const inverses = new Float64Array(strengths.length);
+    for (let bolt = 0; bolt < strengths.length; bolt++) inverses[bolt] = inverse(strengths[bolt]!);
+    return inverses;
   }
 
   private levelStrength(row: number, column: number, sign: number, rec: Rec): number {
@@ -140,4 +153,16 @@ export class GroupBearing {
 /** Finite, so that no force at all stays none beside a strength of 0. */
 function inverse(strength: number): number {
   return Math.min(1 / strength, 1e100);
+}
+
+function greatest(strengths: Float64Array): number {
+  let most = 0;
+  for (let bolt = 0; bolt < strengths.length; bolt++) most = Math.max(most, strengths[bolt]!);
+  return most;
+}
+
+function least(strengths: Float64Array): number {
+  let found = Infinity;
+  for (let bolt = 0; bolt < strengths.length; bolt++) found = Math.min(found, strengths[bolt]!);
+  return found;
 }

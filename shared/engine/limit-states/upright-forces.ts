@@ -21,11 +21,19 @@ export class UprightForces {
     const count = rows * columns;
     this.fx = new Float64Array(count);
     this.fy = new Float64Array(count);
+    this.x = new Float64Array(count);
+    this.y = new Float64Array(count);
     const middle = ((columns - 1) * gauge) / 2;
-    this.x = Float64Array.from(this.fx, (_, bolt) => (bolt % columns) * gauge - middle);
     const half = groupHeight(group) / 2;
-    this.y = Float64Array.from(this.fy, (_, bolt) => Math.floor(bolt / columns) * pitch - half);
-    this.polar = this.x.reduce((sum, x, bolt) => sum + x * x + this.y[bolt]! ** 2, 0);
+    let polar = 0;
+    for (let bolt = 0; bolt < count; bolt++) {
+      const x = (bolt % columns) * gauge - middle;
+      const y = Math.floor(bolt / columns) * pitch - half;
+      this.x[bolt] = x;
+      this.y[bolt] = y;
+      polar += x * x + y * y;
+    }
+    this.polar = polar;
   }
 
   /** Loads the group with N and V, N, and a moment about its middle, anticlockwise, N mm. */

@@ -1,28 +1,17 @@
-import { GroupBearing } from '../../limit-states/group-bearing.ts';
+import type { GroupBearing } from '../../limit-states/group-bearing.ts';
 import { type NetSection, netSectionOf } from '../../limit-states/net-section.ts';
 import type { UprightPly } from '../../limit-states/upright-block.ts';
 import { UprightForces } from '../../limit-states/upright-forces.ts';
-import {
-  groupHeight,
-  groupWidth,
-  type PlyEdges,
-  type UprightGroup,
-} from '../../limit-states/upright-group.ts';
-import type {
-  Basis,
-  BearingPly,
-  BoltInShear,
-  EdgeFinish,
-  FilletStrength,
-  HoleMaking,
-} from '../../standards/basis.ts';
+import { groupHeight, groupWidth, type UprightGroup } from '../../limit-states/upright-group.ts';
+import type { Basis, BoltInShear, EdgeFinish, FilletStrength, HoleMaking } from '../../standards/basis.ts';
 import { type BeamEnd, beamEndOf } from '../beam-end/beam.ts';
 import { type CopedSection, copedSectionOf } from '../beam-end/coped-section.ts';
 import { isUsed } from '../given.ts';
-import { boltOf, noGrade, normalHole, noSteel, plateOf, weldedParts, type WeldedPlate } from '../parts.ts';
+import { boltOf, noGrade, noSteel, plateOf, type WeldedPlate } from '../parts.ts';
 import type { Resolved } from '../resolved.ts';
 import { TOLERANCE } from '../rules.ts';
 import { type Lines, linesOf } from './lines.ts';
+import { bearingOf, weldOf } from './model-parts.ts';
 import { methodParameters } from './parameters-method.ts';
 
 /** Everything about one fin plate that does not change with the load angle. N, mm, MPa; y from the middle of the bolts. */
@@ -91,10 +80,23 @@ export function buildModel(values: Resolved, basis: Basis): FinPlateModel {
     below: layout.endDistance,
   };
   const lap = { values, basis, bolt, group, oneBolt };
+  // Spelled out: copying whole objects is most of the work of a variant in a sweep.
   return {
-    ...plate,
-    ...layout,
-    ...weld,
+    thickness,
+    plate: plate.plate,
+    support: plate.support,
+    supportThickness: plate.supportThickness,
+    group,
+    firstColumn,
+    lastColumn: layout.lastColumn,
+    height,
+    width: layout.width,
+    endDistance: layout.endDistance,
+    edgeDistance: layout.edgeDistance,
+    weldLeg: weld.weldLeg,
+    fillet: weld.fillet,
+    fullStrengthLeg: weld.fullStrengthLeg,
+    countedWeld: weld.countedWeld,
     values,
     basis,
     gradeMissing: bolt.grade === noGrade,
@@ -142,58 +144,9 @@ function layoutOf(values: Resolved) {
   };
 }
 
-function weldOf(values: Resolved, basis: Basis, plate: WeldedPlate, height: number, lines: Lines) {
-  const weldLeg = values.number('weld_leg');
-  const spec = {
-    leg: weldLeg,
-    xu: values.electrode('electrode').xu,
-    parts: weldedParts(plate),
-    directional: values.choice('weld_method') === 'directional',
-    matching: values.choice('electrode_match') === 'matching',
-  };
-  const fillet = basis.fillet({ ...spec, concentric: lines.weldLever <= TOLERANCE });
-  const deducted = values.choice('weld_ends') === 'deducted';
-  // In the plate at yield across its thickness a fillet has half of it, t f_yd/2 per mm; its use falls as it grows.
-  const force = (plate.thickness * basis.yieldStress(plate.plate.fy)) / 2;
-  const use = basis.fillet({ ...spec, concentric: true }).metalUtilisation(force, 0, null);
-  return {
-    weldLeg,
-    fillet,
-    fullStrengthLeg: weldLeg * use,
-    countedWeld: Math.max(1, height - (deducted ? fillet.runOut : 0)),
-  };
-}
-
-interface Lap {
-  readonly values: Resolved;
-  readonly basis: Basis;
-  readonly bolt: BoltInShear;
-  readonly group: UprightGroup;
-  readonly oneBolt: number;
-}
-
-/** Bearing on one ply; a basis may hold it down across a single column or a single row. */
-function bearingOf(lap: Lap, thickness: number, fu: number, edges: PlyEdges): GroupBearing {
-  const { values, basis, bolt, group, oneBolt } = lap;
-  const limited = values.choice('single_lap') === 'limited';
-  const ply: BearingPly = {
-    ...bolt,
-    normalHole: normalHole(values, basis) ?? bolt.holeDiameter,
-    thickness,
-    fu,
-    singleLapOneRow: false,
-    // Shear of the bolts is a limit state of its own, found for the most loaded bolt.
-    boltShear: Infinity,
-    deformationMatters: values.choice('hole_deformation') === 'limited',
-  };
-  const level = basis.bearing({ ...ply, singleLapOneRow: limited && group.columns === 1 });
-  const upright = basis.bearing({ ...ply, singleLapOneRow: limited && group.rows === 1 });
-  const least = values.choice('bolt_bearing') === 'least';
-  return new GroupBearing(basis, level, upright, group, edges, oneBolt, least);
-}
-
 /** Whether a method is chosen and the basis has that choice. */
 function isChosen(values: Resolved, basis: Basis, name: string, value: string): boolean {
+  if (values.choice(name) !== value) return false;
   const spec = methodParameters.find((one) => one.name === name);
-  return spec !== undefined && isUsed(spec, values, basis) && values.choice(name) === value;
+  return spec !== undefined && isUsed(spec, values, basis);
 }
