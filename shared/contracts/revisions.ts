@@ -49,6 +49,20 @@ export const revisionResponse = z.object({
 });
 export type Revision = z.infer<typeof revisionResponse>;
 
+/** Saved versions of a definition, newest first; the oldest of many are left out. */
+export const savedVersionsResponse = z.object({
+  total: z.number().int(),
+  saves: z.array(
+    z.object({
+      number: z.number().int(),
+      at: instantSchema,
+      person: personRefSchema,
+      definition: definitionSchema,
+    }),
+  ),
+});
+export type SavedVersion = z.infer<typeof savedVersionsResponse>['saves'][number];
+
 export const saveDefinitionRequest = z.strictObject({ definition: definitionSchema });
 export const commentRequest = z.strictObject({ comment: z.string().trim().min(3).max(2000) });
 export const submitRequest = z.strictObject({ comment: z.string().trim().max(2000).default('') });

@@ -1,9 +1,16 @@
 import type { Definition } from '@shared/contracts/definition.ts';
-import { revisionResponse, sweepResponse, type Revision } from '@shared/contracts/revisions.ts';
+import {
+  revisionResponse,
+  savedVersionsResponse,
+  sweepResponse,
+  type Revision,
+} from '@shared/contracts/revisions.ts';
 import { get, post, request } from './http.ts';
 
 export const fetchRevision = (id: number, signal?: AbortSignal) =>
   get(revisionResponse, `/api/revisions/${id}`, signal ? { signal } : {});
+
+export const fetchSaves = (id: number) => get(savedVersionsResponse, `/api/revisions/${id}/saves`);
 
 /** Saves a definition over the version that was read; a ProblemError of status 412 says that it has moved on. */
 export const saveDefinition = (id: number, lockVersion: number, definition: Definition) =>

@@ -34,6 +34,7 @@ const matrix: Record<string, string> = {
   'post /api/families/:id/revisions': 'S',
   'post /api/definitions/check': 'S',
   'get /api/revisions/:id': 'SEDA',
+  'get /api/revisions/:id/saves': 'S',
   'put /api/revisions/:id/definition': 'S',
   'post /api/revisions/:id/sweep': 'S',
   'post /api/revisions/:id/submit': 'S',

@@ -5,6 +5,7 @@ import {
   reasonRequest,
   revisionResponse,
   saveDefinitionRequest,
+  savedVersionsResponse,
   submitRequest,
 } from '@shared/contracts/revisions.ts';
 import type { z } from 'zod';
@@ -19,6 +20,7 @@ import {
   submitRevision,
   withdrawRevision,
 } from './life-service.ts';
+import { listSaves } from './history-service.ts';
 import { saveDefinition } from './save-service.ts';
 
 const managers: readonly Role[] = ['standards-manager'];
@@ -64,6 +66,15 @@ export const routes = defineRoutes('revisions', [
       etag(revision.lockVersion);
       return revision;
     },
+  }),
+  route({
+    method: 'get',
+    path: '/api/revisions/:id/saves',
+    summary: 'Saved versions of the definition',
+    who: managers,
+    params: idParams,
+    response: savedVersionsResponse,
+    handler: ({ app, person, params }) => listSaves(app, person, params.id),
   }),
   route({
     method: 'put',

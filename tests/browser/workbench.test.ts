@@ -1,0 +1,126 @@
+import { mkdtempSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
+import type { Browser, Page } from 'playwright-core';
+import { afterAll, beforeAll, expect, test } from 'vitest';
+import { launchBrowser, openPage } from '../support/browser.ts';
+import { signIn, type } from './desk.ts';
+
+/* The standards manager's form: nothing that was typed is lost, and two at once see each other. */
+
+let browser: Browser;
+let manager: Page;
+const folder = mkdtempSync(join(tmpdir(), 'backmark-files-'));
+
+async function at(email: string): Promise<Page> {
+  const { page } = await openPage(browser, { acceptDownloads: true });
+  page.setDefaultTimeout(15_000);
+  await signIn(page, email);
+  return page;
+}
+const value = (page: Page, label: string) => page.getByLabel(label, { exact: true }).first().inputValue();
+const status = (page: Page, text: string) => page.getByRole('status').getByText(text, { exact: true });
+
+beforeAll(async () => {
+  browser = await launchBrowser();
+  manager = await at('standards@harrowquay.example');
+});
+afterAll(async () => {
+  await browser.close();
+  rmSync(folder, { recursive: true });
+});
+
+test('undo and redo go step by step through the whole form', async () => {
+  await manager.goto('/families/new');
+  await type(manager, 'Plate thickness', '16');
+  await expect.poll(() => manager.getByRole('button', { name: 'Undo' }).isEnabled()).toBe(true);
+  await manager.getByRole('button', { name: 'Undo' }).click();
+  expect(await value(manager, 'Plate thickness')).toBe('12');
+  await manager.getByRole('button', { name: 'Redo' }).click();
+  expect(await value(manager, 'Plate thickness')).toBe('16');
+  await type(manager, 'Weld leg', '10');
+  await manager.keyboard.press('Control+z');
+  expect(await value(manager, 'Weld leg')).toBe('8');
+  expect(await value(manager, 'Plate thickness')).toBe('16');
+  await manager.keyboard.press('Control+y');
+  expect(await value(manager, 'Weld leg')).toBe('10');
+});
+
+test('a definition is written to a file and read back; a faulty file leaves the form as it was', async () => {
+  await type(manager, 'Code', 'WB-01');
+  await type(manager, 'Title', 'From the workbench');
+  await manager.getByRole('button', { name: 'More for this definition' }).click();
+  const download = manager.waitForEvent('download');
+  await manager.getByText('Save as a file').click();
+  const path = await (await download).path();
+  const written = JSON.parse(readFileSync(path, 'utf8')) as {
+    definition: { parameters: Record<string, unknown> };
+  };
+  expect(written).toMatchObject({ file: 'backmark-family', version: 1, code: 'WB-01' });
+  expect(written.definition.parameters.weld_leg).toEqual({ mode: 'fixed', value: 10 });
+
+  const chooser = manager.getByLabel('File with a family definition');
+  const give = async (name: string, content: unknown) => {
+    const file = join(folder, name);
+    writeFileSync(file, typeof content === 'string' ? content : JSON.stringify(content));
+    await chooser.setInputFiles(file);
+  };
+  await give('newer.json', { ...written, version: 7 });
+  await manager.getByText('It has version 7, made by a newer Backmark; this one reads version 1.').waitFor();
+  await give('broken.json', '{ "file": ');
+  await manager.getByText(/It is not JSON/).waitFor();
+  expect(await value(manager, 'Weld leg')).toBe('10');
+  const thicker = structuredClone(written);
+  thicker.definition.parameters.plate_thickness = { mode: 'fixed', value: 20 };
+  await give('thicker.json', thicker);
+  await expect.poll(() => value(manager, 'Plate thickness')).toBe('20');
+});
+
+test('a draft saves itself, keeps its versions, and is duplicated', async () => {
+  await manager.getByRole('button', { name: 'Save', exact: true }).click();
+  await manager.getByText('WB-01 is saved.').waitFor();
+  await type(manager, 'Pitch', '75');
+  await status(manager, 'Not saved yet').waitFor();
+  await status(manager, 'Saved').waitFor();
+  await manager.reload();
+  expect(await value(manager, 'Pitch')).toBe('75');
+
+  await manager.getByRole('button', { name: 'More for this definition' }).click();
+  await manager.getByText('Saved versions').click();
+  const dialog = manager.getByRole('dialog');
+  await dialog.getByText('First version').waitFor();
+  await dialog.getByText('Pitch:').waitFor();
+  await dialog.getByRole('button', { name: 'Put into the form' }).last().click();
+  expect(await value(manager, 'Pitch')).toBe('70');
+  await manager.getByRole('button', { name: 'Undo' }).click();
+  expect(await value(manager, 'Pitch')).toBe('75');
+
+  await manager.getByRole('button', { name: 'More for this definition' }).click();
+  await manager.getByText('Duplicate as a new family').click();
+  await expect.poll(() => value(manager, 'Title')).toBe('From the workbench (copy)');
+  expect(await value(manager, 'Pitch')).toBe('75');
+  expect(await value(manager, 'Code')).toBe('');
+});
+
+test('two managers at once: the second to save chooses field by field, and nothing is lost', async () => {
+  const other = await at('details@harrowquay.example');
+  await manager.goto('/families');
+  await manager.getByRole('link', { name: 'WB-01' }).click();
+  await expect.poll(() => value(manager, 'Pitch')).toBe('75');
+  await other.goto(manager.url());
+  await expect.poll(() => value(other, 'Pitch')).toBe('75');
+
+  await type(other, 'Plate thickness', '24');
+  await other.getByRole('button', { name: 'Save', exact: true }).click();
+  await other.getByText('WB-01 is saved.').waitFor();
+
+  await type(manager, 'Pitch', '80');
+  await manager.getByRole('button', { name: 'Save', exact: true }).click();
+  const dialog = manager.getByRole('dialog', { name: 'Saved by somebody else in the meantime' });
+  const row = dialog.getByRole('row').filter({ hasText: 'Plate thickness' });
+  await row.getByRole('radio').last().check();
+  await dialog.getByRole('button', { name: 'Save what is chosen' }).click();
+  await status(manager, 'Saved').waitFor();
+  expect(await value(manager, 'Plate thickness')).toBe('24');
+  expect(await value(manager, 'Pitch')).toBe('80');
+});
