@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { capacityOf, type WholeDetail } from './details/detail.ts';
+import { capacityOf, type WholeDetail } from '@shared/verification/details/detail.ts';
 
 /*
  * The weld of a gusset plate by other means: the line is cut into short pieces, each a point that pulls and shears,

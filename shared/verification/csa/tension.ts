@@ -1,4 +1,4 @@
-import * as csa from '@shared/engine/standards/csa-s16-2019/index.ts';
+import * as csa from '../../engine/standards/csa-s16-2019/index.ts';
 import { type Check, printed } from '../check.ts';
 import { pryingByHand } from '../prying-by-hand.ts';
 

@@ -1,7 +1,7 @@
-import { print } from '@server/cli/print.ts';
-import { type Check, toleranceOf, verdictOf } from './check.ts';
-import { disagreements, notYetAnswered } from './disagreements.ts';
-import { checks } from './registry.ts';
+import { print } from './print.ts';
+import { type Check, toleranceOf, verdictOf } from '@shared/verification/check.ts';
+import { disagreements, notYetAnswered } from '@shared/verification/disagreements.ts';
+import { checks } from '@shared/verification/registry.ts';
 
 /*
  * npm run verification [-- --json]

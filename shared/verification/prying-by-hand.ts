@@ -1,5 +1,5 @@
-import type { BasisId } from '@shared/engine/index.ts';
-import { createBasis } from '@shared/engine/standards/registry.ts';
+import type { BasisId } from '../engine/index.ts';
+import { createBasis } from '../engine/standards/registry.ts';
 import { bolt } from './bases.ts';
 import { type Check, printed } from './check.ts';
 

@@ -5,7 +5,7 @@ import {
   grossYield,
   leastEdgeDistance,
   leastFilletLeg,
-} from '@shared/engine/standards/sans-10162-1-2011/index.ts';
+} from '../../engine/standards/sans-10162-1-2011/index.ts';
 import { sans } from '../bases.ts';
 import { type Check, type Printed, printed, rounding, threeFigures } from '../check.ts';
 

@@ -3,7 +3,7 @@ import {
   correlationFactor,
   filletDirectional,
   filletSimplified,
-} from '@shared/engine/standards/en-1993-1-8-2005/index.ts';
+} from '../../engine/standards/en-1993-1-8-2005/index.ts';
 import { type Check, printed } from '../check.ts';
 
 const gammaM2 = 1.25;

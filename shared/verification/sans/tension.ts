@@ -1,4 +1,4 @@
-import * as sans from '@shared/engine/standards/sans-10162-1-2011/index.ts';
+import * as sans from '../../engine/standards/sans-10162-1-2011/index.ts';
 import { type Check, printed } from '../check.ts';
 import { pryingByHand } from '../prying-by-hand.ts';
 

@@ -1,7 +1,4 @@
-import {
-  boltTensionResistance,
-  punchingResistance,
-} from '@shared/engine/standards/en-1993-1-8-2005/index.ts';
+import { boltTensionResistance, punchingResistance } from '../../engine/standards/en-1993-1-8-2005/index.ts';
 import { bolt, type Diameter, en, grades, tableHole } from '../bases.ts';
 import { type Check, type Evidence, printed } from '../check.ts';
 

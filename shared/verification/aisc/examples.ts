@@ -1,4 +1,4 @@
-import * as aisc from '@shared/engine/standards/aisc-360-2022/index.ts';
+import * as aisc from '../../engine/standards/aisc-360-2022/index.ts';
 import { type Check, type Disagreement, rounding } from '../check.ts';
 import { COMPANION, Rows } from './formats.ts';
 

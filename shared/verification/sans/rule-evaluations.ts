@@ -9,7 +9,7 @@ import {
   netSectionResistance,
   oneLegFactor,
   shearTensionUtilisation,
-} from '@shared/engine/standards/sans-10162-1-2011/index.ts';
+} from '../../engine/standards/sans-10162-1-2011/index.ts';
 import { type Check, printed } from '../check.ts';
 
 /*

@@ -8,7 +8,7 @@ import {
   type PreparedDetail,
   type Sense,
   toRadians,
-} from '@shared/engine/index.ts';
+} from '../../engine/index.ts';
 
 /** Everything is given by its numbers, so that no record of the catalogue takes part. */
 const nothing: EngineCatalogue = { boltSizes: [], boltGrades: [], steels: [], electrodes: [], sections: [] };
@@ -39,3 +39,18 @@ export function capacityOf(whole: WholeDetail, code: string): number {
   const index = code === 'R' ? governing : detail.limitStates.findIndex((state) => state.code === code);
   return kilonewtons(out[index] ?? NaN);
 }
+
+/** Which limit state of which kind a check of a whole detail asks about; `R` asks about whichever governs. */
+export interface AskedOf {
+  readonly kind: KindId;
+  readonly code: string;
+}
+
+/** The capacity of a limit state of a whole detail as one side of a check, kN. */
+export const asked = (
+  whole: WholeDetail,
+  code: string,
+): { readonly asks: AskedOf; readonly ours: () => number } => ({
+  asks: { kind: whole.kind ?? 'gusset-plate', code },
+  ours: () => capacityOf(whole, code),
+});

@@ -1,5 +1,5 @@
-import type { BoltGrade, BoltSize } from '@shared/engine/index.ts';
-import { createBasis } from '@shared/engine/standards/registry.ts';
+import type { BoltGrade, BoltSize } from '../engine/index.ts';
+import { createBasis } from '../engine/standards/registry.ts';
 
 const found = <T>(value: T | undefined): T => {
   if (value === undefined) throw new Error('a design basis is missing');

@@ -1,4 +1,4 @@
-import type { BasisId } from '@shared/engine/index.ts';
+import type { BasisId } from '../engine/index.ts';
 
 /**
  * How a published value is known. `rule evaluation` is a formula worked out by hand, not a number seen in print:
@@ -31,6 +31,8 @@ export interface Check {
   readonly published: Printed;
   readonly unit: string;
   readonly ours: () => number;
+  /** The limit state of a kind that is asked about, where a whole detail is. */
+  readonly asks?: { readonly kind: string; readonly code: string };
   readonly roundedFirst?: RoundedFirst;
   /** What makes the check weak, when something does. */
   readonly weak?: string;

@@ -1,4 +1,4 @@
-import { asd, available, type FactorPair, lrfd } from '@shared/engine/standards/aisc-360-2022/index.ts';
+import { asd, available, type FactorPair, lrfd } from '../../engine/standards/aisc-360-2022/index.ts';
 import { type Check, printed, type RoundedFirst, threeFigures } from '../check.ts';
 
 export const COMPANION =

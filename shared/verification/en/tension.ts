@@ -1,11 +1,11 @@
-import { lengthsOfGroup } from '@shared/engine/limit-states/t-stub.ts';
+import { lengthsOfGroup } from '../../engine/limit-states/t-stub.ts';
 import {
   boltsWithFlange,
   boltTensionResistance,
   plasticMoment,
   pryingLever,
   tyingFactor,
-} from '@shared/engine/standards/en-1993-1-8-2005/index.ts';
+} from '../../engine/standards/en-1993-1-8-2005/index.ts';
 import { bolt, en, grades } from '../bases.ts';
 import { type Check, printed, rounding } from '../check.ts';
 

@@ -2,7 +2,7 @@ import {
   blockTearing,
   grossYield,
   netSectionResistance,
-} from '@shared/engine/standards/en-1993-1-8-2005/index.ts';
+} from '../../engine/standards/en-1993-1-8-2005/index.ts';
 import { bolt, type Diameter, en, grades } from '../bases.ts';
 import { type Check, printed, type RoundedFirst, rounding } from '../check.ts';
 

@@ -1,4 +1,4 @@
-import * as csa from '@shared/engine/standards/csa-s16-2019/index.ts';
+import * as csa from '../../engine/standards/csa-s16-2019/index.ts';
 import {
   type Check,
   type Disagreement,
@@ -278,7 +278,7 @@ const t11 = example('T-11', (r) => {
 });
 
 /** Worked examples of the notes. */
-export const courseNotes: readonly Check[] = [
+export const holtzExamples: readonly Check[] = [
   ...c10,
   ...c30,
   ...c40,
@@ -292,7 +292,7 @@ export const courseNotes: readonly Check[] = [
 ];
 
 /** Printed values of the notes that do not follow from their own rule. */
-export const courseNoteDisagreements: readonly Disagreement[] = [
+export const holtzDisagreements: readonly Disagreement[] = [
   {
     id: 'csa-c40-across',
     published: '111 kN, 80 mm of 6 mm fillet at 90°',

@@ -1,5 +1,5 @@
 import { type Check, printed } from '../check.ts';
-import { capacityOf, type WholeDetail } from './detail.ts';
+import { asked, type WholeDetail } from './detail.ts';
 
 /** A limit state's code, its clause, the value by hand in kN, and the arithmetic. */
 type Step = readonly [code: string, clause: string, kN: string, arithmetic: string];
@@ -14,7 +14,7 @@ function byHand(id: string, inputs: string, whole: WholeDetail, steps: readonly 
     inputs,
     published: printed(kN),
     unit: 'kN',
-    ours: () => capacityOf(whole, code),
+    ...asked(whole, code),
     note,
   }));
 }
@@ -250,7 +250,7 @@ const course: readonly Check[] = (
   inputs: 'two plates 140 × 10 (350/450) lapped, 6 M20 fub 830 in 2 lines of 3',
   published: printed(text),
   unit: 'kN',
-  ours: () => capacityOf(lap, code),
+  ...asked(lap, code),
   weak: 'printed for CSA S16, whose clause has the same expression and the same factor',
 }));
 

@@ -1,11 +1,11 @@
-import * as aisc from '@shared/engine/standards/aisc-360-2022/index.ts';
+import * as aisc from '../../engine/standards/aisc-360-2022/index.ts';
 import {
   extendedEdge,
   netShare,
   pryingPull,
   reducedLever,
   singleCurvature,
-} from '@shared/engine/standards/prying.ts';
+} from '../../engine/standards/prying.ts';
 import { type Check, rounding } from '../check.ts';
 import { COMPANION, Rows } from './formats.ts';
 

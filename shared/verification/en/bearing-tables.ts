@@ -1,4 +1,4 @@
-import { alphaB, bearingResistance, edgeFactor } from '@shared/engine/standards/en-1993-1-8-2005/index.ts';
+import { alphaB, bearingResistance, edgeFactor } from '../../engine/standards/en-1993-1-8-2005/index.ts';
 import { bolt, type Diameter, en, grades, tableHole } from '../bases.ts';
 import { type Check, printed, threeFigures } from '../check.ts';
 

@@ -1,4 +1,6 @@
+import { aiscDisagreements } from './aisc/index.ts';
 import type { Disagreement } from './check.ts';
+import { csaDisagreements } from './csa/index.ts';
 
 /** Published values that a reader may hold against the engine, and why it does not follow them. */
 export const disagreements: readonly Disagreement[] = [
@@ -54,22 +56,8 @@ export const disagreements: readonly Disagreement[] = [
     published: 'bearing of end bolts at 40/66 in FIN-04, PDE-01, CLT-05',
     reason: 'α_b is rounded up to 0.61 before it is used, so the print is 0.7 to 1.0 % high.',
   },
-  {
-    id: 'D-C50-bearing',
-    published: '931 kN (course notes to CSA S16, example C50)',
-    reason:
-      'The notes use 0.7 where the factor is 0.80: 1064 kN. SANS has 0.67 and its own end-distance rule.',
-  },
-  {
-    id: 'D-CPS1-weld',
-    published: '1290 kN, 688 mm of 8 mm fillet across, Xu 490 (course notes, problem set)',
-    reason: 'The clause gives 1284 kN; the print fits a strength rounded up to 1.25 kN/mm.',
-  },
-  {
-    id: 'D-C40-across',
-    published: '111 kN, 80 mm of 6 mm fillet across, Xu 490 (course notes, example C40)',
-    reason: 'The clause gives 112.0 kN; the print is 0.9 % low by rounding on the way.',
-  },
+  ...csaDisagreements,
+  ...aiscDisagreements,
 ];
 
 /** Published checks that wait for parts of the engine: nothing here is claimed. */

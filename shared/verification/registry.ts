@@ -1,5 +1,8 @@
+import { aiscChecks } from './aisc/index.ts';
 import type { Check } from './check.ts';
+import { csaChecks } from './csa/index.ts';
 import { finPlates } from './details/fin-plate.ts';
+import { gussetPlatesNorthAmerica } from './details/gusset-north-american.ts';
 import { gussetPlates } from './details/gusset-plate.ts';
 import { enBearingTables } from './en/bearing-tables.ts';
 import { enBolts } from './en/bolts.ts';
@@ -20,6 +23,9 @@ export const checks: readonly Check[] = [
   ...sansSameExpression,
   ...sansRuleEvaluations,
   ...sansTension,
+  ...csaChecks,
+  ...aiscChecks,
   ...gussetPlates,
+  ...gussetPlatesNorthAmerica,
   ...finPlates,
 ];
