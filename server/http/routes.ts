@@ -4,6 +4,7 @@ import { routes as families } from '../features/families/routes.ts';
 import { routes as audit } from '../features/audit/routes.ts';
 import { routes as auth } from '../features/auth/routes.ts';
 import { routes as catalogue } from '../features/catalogue/routes.ts';
+import { routes as verification } from '../features/verification/routes.ts';
 import { routes as exported } from '../features/exports/routes.ts';
 import { routes as health } from '../features/health/routes.ts';
 import { routes as lookup } from '../features/lookup/routes.ts';
@@ -21,6 +22,7 @@ export const allRoutes: readonly RouteDeclaration[] = [
   ...settings,
   ...audit,
   ...catalogue,
+  ...verification,
   ...results,
   ...lookup,
   ...exported,

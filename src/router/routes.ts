@@ -27,6 +27,12 @@ export const routes: RouteRecordRaw[] = [
     meta: { title: 'Families' },
   },
   {
+    path: '/verification',
+    name: 'verification',
+    component: () => import('../views/VerificationView.vue'),
+    meta: { title: 'Verification' },
+  },
+  {
     path: '/families/new',
     name: 'family-new',
     component: () => import('../views/FamilyEditorView.vue'),

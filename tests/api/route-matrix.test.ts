@@ -27,6 +27,7 @@ const matrix: Record<string, string> = {
   'get /api/audit': 'A',
   'get /api/audit/verification': 'A',
   'get /api/catalogue': 'SEDA',
+  'get /api/verification': 'SEDA',
   'get /api/families': 'SEDA',
   'post /api/families': 'S',
   'get /api/families/:id': 'SEDA',

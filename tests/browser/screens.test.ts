@@ -45,6 +45,7 @@ const screens: readonly Screen[] = [
   },
   { name: 'exports', path: '/exports?revision=2', as: 'drafter', shows: 'Drawing number' },
   { name: 'sweeps', path: '/sweeps', as: 'standards', shows: 'Sweeps' },
+  { name: 'verification', path: '/verification', as: 'engineer', shows: /checks by engine/ },
   { name: 'people', path: '/people', as: 'admin', shows: 'Priya Oduya' },
   { name: 'settings', path: '/settings', as: 'admin', shows: 'Name of the firm' },
   { name: 'audit', path: '/audit', as: 'admin', shows: /revision/i },

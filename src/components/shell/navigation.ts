@@ -7,6 +7,7 @@ import {
   mdiFileTableOutline,
   mdiHomeOutline,
   mdiProgressClock,
+  mdiCheckDecagramOutline,
 } from '@mdi/js';
 import type { Me } from '@shared/contracts/auth.ts';
 
@@ -23,6 +24,7 @@ const PLACES: readonly Place[] = [
   { name: 'families', title: 'Families', icon: mdiBookOpenVariantOutline },
   { name: 'sweeps', title: 'Sweeps', icon: mdiProgressClock, needs: 'seeDrafts' },
   { name: 'exports', title: 'Exports', icon: mdiFileTableOutline },
+  { name: 'verification', title: 'Verification', icon: mdiCheckDecagramOutline },
   { name: 'people', title: 'People', icon: mdiAccountGroupOutline, needs: 'managePeople' },
   { name: 'audit', title: 'Audit trail', icon: mdiClipboardTextClockOutline, needs: 'readAudit' },
   { name: 'settings', title: 'Settings', icon: mdiCogOutline },
