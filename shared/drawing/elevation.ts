@@ -1,7 +1,8 @@
 import type { DetailGeometry, Point, Sense } from '../engine/types.ts';
+import { boltOf, holeAt } from './bolt.ts';
 import { drawDimension } from './dimension.ts';
 import { extentOf } from './extent.ts';
-import { circle, type Drawing, line, type Primitive, ring, type WeldSymbols } from './primitives.ts';
+import { type Drawing, line, type Primitive, ring, type WeldSymbols } from './primitives.ts';
 import { drawWeldSymbol } from './weld-symbol.ts';
 
 /** The sheet that a view is meant for, in units of it: lines of words keep their size at any scale. */
@@ -45,17 +46,7 @@ function partsOf(geometry: DetailGeometry): Primitive[] {
     ...geometry.welds.map(({ from, to }) => line('weld', from, to)),
     line('axis', geometry.axis.from, geometry.axis.to),
     ...geometry.holes.flatMap(({ centre, diameter }) => holeAt(centre, diameter)),
-  ];
-}
-
-/** A hole to scale with its centre lines. */
-function holeAt(centre: Point, diameter: number): Primitive[] {
-  const reach = diameter * 0.75;
-  const { x, y } = centre;
-  return [
-    circle('hole', centre, diameter / 2),
-    line('centre', { x: x - reach, y }, { x: x + reach, y }),
-    line('centre', { x, y: y - reach }, { x, y: y + reach }),
+    ...(geometry.bolts ?? []).flatMap(boltOf),
   ];
 }
 

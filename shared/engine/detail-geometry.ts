@@ -22,6 +22,8 @@ export interface DetailView {
   }[];
   /** Shanks by their axes, from head to nut. */
   readonly bolts: readonly { readonly from: Point; readonly to: Point; readonly diameter: number }[];
+  /** Holes seen on their faces. */
+  readonly holes?: readonly { readonly centre: Point; readonly diameter: number }[];
   /** Cross-sections of fillets: root first, then the two toes. */
   readonly fillets: readonly (readonly [Point, Point, Point])[];
   readonly dimensions: readonly Dimension[];
@@ -36,6 +38,8 @@ export interface DetailGeometry {
     readonly leg: number;
     readonly bothSides: boolean;
   }[];
+  /** Bolts seen from the side, from head to nut. */
+  readonly bolts?: DetailView['bolts'];
   /** Outlines of the connected member's parts in this view, nearest last. */
   readonly member: readonly { readonly outline: readonly Point[]; readonly hidden: boolean }[];
   readonly axis: { readonly from: Point; readonly to: Point };

@@ -68,9 +68,9 @@ export const notYetAnswered: readonly Disagreement[] = [
     reason: 'Need the elastic bolt group of those kinds.',
   },
   {
-    id: 'CLT-07, 08; PDE-03',
+    id: 'CLT-07, 08',
     published: 'cleats in shear, handbook factors',
-    reason: 'Need the limit states of cleats and end plates.',
+    reason: 'Need the limit states of cleats.',
   },
   { id: 'CLT-12', published: 'm of cleats', reason: 'Needs the kind of angle cleats.' },
   { id: 'SLP-*', published: 'slip resistance', reason: 'Slip-resistant bolts are not covered.' },

@@ -1,6 +1,7 @@
 import { aiscChecks } from './aisc/index.ts';
 import type { Check } from './check.ts';
 import { csaChecks } from './csa/index.ts';
+import { endPlates } from './details/end-plate.ts';
 import { finPlates } from './details/fin-plate.ts';
 import { gussetPlatesNorthAmerica } from './details/gusset-north-american.ts';
 import { gussetPlates } from './details/gusset-plate.ts';
@@ -28,4 +29,5 @@ export const checks: readonly Check[] = [
   ...gussetPlates,
   ...gussetPlatesNorthAmerica,
   ...finPlates,
+  ...endPlates,
 ];

@@ -83,7 +83,8 @@ describe('rules of validity', () => {
     const detail = prepare(LRFD, { ...plain, weld_leg: 3 });
     expect(detail.outcome(1, 'tension')).toMatchObject({
       status: 'not-permitted',
-      rejections: [{ rule: 'weld-leg-least', value: 3, limit: 5 }],
+      // Table J2.4: 3/16 in, which is lower than the 5 mm of Table J2.4M.
+      rejections: [{ rule: 'weld-leg-least', value: 3, limit: (3 / 16) * 25.4 }],
     });
     const sheet = detail.record(1, 'tension');
     expect(sheet.some(({ id }) => id === 'rules')).toBe(true);

@@ -1,4 +1,5 @@
 import type { DetailKind, KindId } from '../types.ts';
+import { endPlate } from './end-plate/index.ts';
 import { finPlate } from './fin-plate/index.ts';
 import { gussetPlate } from './gusset-plate/index.ts';
 
@@ -6,6 +7,7 @@ import { gussetPlate } from './gusset-plate/index.ts';
 const registry: Readonly<Record<KindId, DetailKind>> = {
   'gusset-plate': gussetPlate,
   'fin-plate': finPlate,
+  'end-plate': endPlate,
 };
 
 export const kinds: readonly DetailKind[] = Object.values(registry);

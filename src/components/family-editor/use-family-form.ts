@@ -1,7 +1,8 @@
 import { findBasis, findKind, kinds } from '@shared/engine/index.ts';
 import type { DetailKind } from '@shared/engine/types.ts';
-import { computed, reactive, ref } from 'vue';
+import { computed, reactive, ref, toRaw, watch } from 'vue';
 import { useCatalogueStore } from '../../stores/catalogue.ts';
+import { isOfOtherKind, ofKind } from './change-kind.ts';
 import { countsOf, refusalOf } from './counts.ts';
 import type { FamilyDraft } from './draft.ts';
 import { readDraft, type FieldFault } from './read-draft.ts';
@@ -32,6 +33,16 @@ export function useFamilyForm(start: FamilyDraft) {
   function take(other: FamilyDraft): void {
     Object.assign(draft, structuredClone(other));
   }
+  watch(
+    () => draft.kind,
+    (_now, before) => {
+      const from = findKind(before);
+      // A draft that was taken whole has its parameters already.
+      if (from && isOfOtherKind(draft, kind.value)) take(ofKind(toRaw(draft), from, kind.value));
+    },
+    { flush: 'sync' },
+  );
+
   /** What stands in the form now is what is stored. */
   function settle(): void {
     saved.value = JSON.stringify(draft);

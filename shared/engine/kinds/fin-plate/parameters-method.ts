@@ -1,30 +1,7 @@
 import type { BasisId, ParameterSpec } from '../../types.ts';
+import { method } from '../schema/method.ts';
 
 const EN: readonly BasisId[] = ['en-1993-1-8-2005'];
-type Choice = readonly [value: string, label: string, help: string];
-
-/** A choice of method; the first of its values is the default. */
-function method(
-  name: string,
-  label: string,
-  help: string,
-  choices: readonly [Choice, ...Choice[]],
-  bases?: readonly BasisId[],
-): ParameterSpec {
-  return {
-    name,
-    label,
-    symbol: '',
-    group: 'method',
-    type: 'choice',
-    unit: '',
-    choices: choices.map(([value, title, meaning]) => ({ value, label: title, help: meaning })),
-    default: choices[0][0],
-    ...(bases === undefined ? {} : { bases }),
-    help,
-  };
-}
-
 /** How the forces are found and which practices count, in the order of a form. */
 export const methodParameters: readonly ParameterSpec[] = [
   method('shear_line', 'Line of shear', 'Where the shear acts: what lies away from it takes the moment.', [

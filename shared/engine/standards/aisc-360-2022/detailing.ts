@@ -30,11 +30,14 @@ export function leastEdgeDistance(d: number): number {
   return row === undefined ? 1.25 * d : row[1];
 }
 
-/** Least fillet leg by the thinner part joined, mm: 3 to 6 mm, 5 to 13, 6 to 19, 8 above. ANSI/AISC 360-22, Table J2.4. */
+/**
+ * Least fillet leg by the thinner part joined, mm: 3 to 6 mm, 5 to 13, 6 to 19, 8 above, and where the table in inches
+ * is lower its value: 3/16 in and 5/16 in. ANSI/AISC 360-22, Tables J2.4M and J2.4.
+ */
 export function leastFilletLeg(thinner: number): number {
-  if (thinner <= 6) return 3;
-  if (thinner <= 13) return 5;
-  return thinner <= 19 ? 6 : 8;
+  if (thinner <= INCH / 4) return 3;
+  if (thinner <= 13) return (3 / 16) * INCH;
+  return thinner <= 0.75 * INCH ? 6 : (5 / 16) * INCH;
 }
 
 /** Clearance of a standard hole, mm: 2 below M24, 3 from M24 up. ANSI/AISC 360-22, Table J3.3M. */
