@@ -1,5 +1,7 @@
 import { aiscDisagreements } from './aisc/index.ts';
 import type { Disagreement } from './check.ts';
+import { beyondRounding as boltsBeyond } from './groups/bolt-table-rows.ts';
+import { beyondRounding as weldsBeyond } from './groups/weld-table-rows.ts';
 import { csaDisagreements } from './csa/index.ts';
 
 /** Published values that a reader may hold against the engine, and why it does not follow them. */
@@ -56,6 +58,12 @@ export const disagreements: readonly Disagreement[] = [
     published: 'bearing of end bolts at 40/66 in FIN-04, PDE-01, CLT-05',
     reason: 'α_b is rounded up to 0.61 before it is used, so the print is 0.7 to 1.0 % high.',
   },
+  {
+    id: 'centre-tables',
+    published: `${boltsBeyond} entries of AISC Manual Tables 7-6 and 7-7; ${weldsBeyond.channel} of Table 8-8 and ${weldsBeyond.pair} of Table 8-38, which are not among the checks`,
+    reason:
+      'They differ from an exact solution by one unit of their last place, a few by two: the tables were made with welds cut into pieces and a search that stops early. All other entries are checks.',
+  },
   ...csaDisagreements,
   ...aiscDisagreements,
 ];
@@ -63,9 +71,9 @@ export const disagreements: readonly Disagreement[] = [
 /** Published checks that wait for parts of the engine: nothing here is claimed. */
 export const notYetAnswered: readonly Disagreement[] = [
   {
-    id: 'FIN-01…03, 06, 17; CLT-01…04; GRP-03',
-    published: 'bolt groups out of balance in fin plates and cleats',
-    reason: 'Need the elastic bolt group of those kinds.',
+    id: 'CLT-01…04; GRP-03',
+    published: 'bolt groups of cleats out of balance',
+    reason: 'Need the kind of angle cleats.',
   },
   {
     id: 'CLT-07, 08',

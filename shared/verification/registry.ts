@@ -10,6 +10,8 @@ import { enBolts } from './en/bolts.ts';
 import { enTension } from './en/tension.ts';
 import { enWelds } from './en/welds.ts';
 import { enWorkedExamples } from './en/worked-examples.ts';
+import { boltTables } from './groups/bolt-tables.ts';
+import { weldTables } from './groups/weld-tables.ts';
 import { sansRuleEvaluations } from './sans/rule-evaluations.ts';
 import { sansSameExpression } from './sans/same-expression.ts';
 import { sansTension } from './sans/tension.ts';
@@ -26,6 +28,8 @@ export const checks: readonly Check[] = [
   ...sansTension,
   ...csaChecks,
   ...aiscChecks,
+  ...boltTables,
+  ...weldTables,
   ...gussetPlates,
   ...gussetPlatesNorthAmerica,
   ...finPlates,

@@ -1,3 +1,4 @@
+import type { BoltNormalisation } from '../groups/bolt-curve.ts';
 import type {
   BasisId,
   BasisInfo,
@@ -188,6 +189,8 @@ export interface Basis {
   readonly modulus: number;
   /** The strength of a bolt group is the sum of what each bolt takes in shear and on both plies. */
   readonly boltByBolt: boolean;
+  /** What a coefficient of the instantaneous centre is a multiple of, or null where the basis does not use that method. */
+  readonly centreNormalisation: BoltNormalisation | null;
   /** Diameter of the normal round hole, mm, or null when the basis has none for a catalogued size. */
   normalHole(size: BoltSize, catalogued: CatalogueBoltSize | null): number | null;
   /** Added to a hole's diameter when an area is reduced for it, mm. */

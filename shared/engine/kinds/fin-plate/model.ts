@@ -1,3 +1,4 @@
+import { coefficientsOf, type PatternCoefficients } from '../../groups/ic-cache.ts';
 import type { GroupBearing } from '../../limit-states/group-bearing.ts';
 import { type NetSection, netSectionOf } from '../../limit-states/net-section.ts';
 import type { UprightPly } from '../../limit-states/upright-block.ts';
@@ -53,6 +54,8 @@ export interface FinPlateModel extends WeldedPlate {
   readonly plateBearing: GroupBearing;
   readonly webBearing: GroupBearing;
   readonly forces: UprightForces;
+  /** Coefficients of the instantaneous centre, or null where the bolts share elastically. */
+  readonly coefficients: PatternCoefficients | null;
 }
 
 /** Handbooks divide the gross shear of the plate by this where it bends as well. */
@@ -119,6 +122,7 @@ export function buildModel(values: Resolved, basis: Basis): FinPlateModel {
     plateBearing: bearingOf(lap, thickness, fu, plateEdges),
     webBearing: bearingOf(lap, beam.web.thickness, beam.steel.fu, beam.edges),
     forces: new UprightForces(group),
+    coefficients: coefficientsFor(values, basis, group),
   };
 }
 
@@ -142,6 +146,12 @@ function layoutOf(values: Resolved) {
     height: groupHeight(group) + 2 * endDistance,
     width: lastColumn + edgeDistance,
   };
+}
+
+function coefficientsFor(values: Resolved, basis: Basis, group: UprightGroup): PatternCoefficients | null {
+  const { rows, columns, pitch, gauge } = group;
+  if (values.choice('bolt_group') !== 'centre' || basis.centreNormalisation === null) return null;
+  return coefficientsOf(rows, columns, pitch, gauge, basis.centreNormalisation);
 }
 
 /** Whether a method is chosen and the basis has that choice. */

@@ -26,6 +26,16 @@ export const methodParameters: readonly ParameterSpec[] = [
     ['either', 'Either way', 'Up and down, the worse kept: a coped web tears more easily one way.'],
     ['by_angle', 'By the load angle', 'Above 0° up; below 0° down, as a beam bears on the plate.'],
   ]),
+  method(
+    'bolt_group',
+    'Eccentric bolts',
+    'How the bolts share the moment; their bearing is elastic either way.',
+    [
+      ['elastic', 'Elastic', 'In proportion to the distance from the middle of the bolts; errs low.'],
+      ['centre', 'Instantaneous centre', 'Bolts deform about one point until the farthest gives way.'],
+    ],
+    ['sans-10162-1-2011', 'csa-s16-2019', 'aisc-360-2022-lrfd', 'aisc-360-2022-asd'],
+  ),
   method('bolt_bearing', 'Bearing of the bolts', 'Which distances a bolt of the group bears with.', [
     [
       'least',

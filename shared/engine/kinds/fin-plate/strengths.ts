@@ -53,8 +53,10 @@ export class Strengths {
 
   /** Resultants of 1 N that the bolts carry for each newton of one bolt's shear. */
   boltMultiplier(cos: number, sin: number, lever: number): number {
-    this.m.forces.load(cos, sin, lever * sin);
-    return 1 / this.m.forces.most;
+    const { coefficients, forces } = this.m;
+    if (coefficients !== null) return coefficients.coefficient(sin, lever * sin);
+    forces.load(cos, sin, lever * sin);
+    return 1 / forces.most;
   }
 
   recordBolts(cos: number, sin: number, rec: Recorder): void {
@@ -63,10 +65,24 @@ export class Strengths {
     for (const lever of m.lines.boltLevers) {
       const where = lever === 0 ? 'shear at the bolts' : 'shear at the face of the support';
       rec.line('M_b', `moment on the bolts, ${where}`, 'V × lever', lever * sin, 'mm', '');
+      if (m.coefficients !== null) {
+        this.recordCentre(cos, sin, lever, rec);
+        continue;
+      }
       rec.line('Σr²', 'about the middle of the bolts', '', m.forces.polar, 'mm²', '');
       const most = 1 / this.boltMultiplier(cos, sin, lever);
       rec.line('F/R', 'most loaded bolt, unit resultant', '√(F_x² + F_y²)', most, 'N per N', '');
     }
+  }
+
+  private recordCentre(cos: number, sin: number, lever: number, rec: Recorder): void {
+    const source = 'instantaneous centre: Crawford and Kulak, 1971';
+    const multiple =
+      this.m.basis.centreNormalisation === 'atMaximum'
+        ? 'of the force at the greatest deformation'
+        : 'of the ultimate strength';
+    const C = this.boltMultiplier(cos, sin, lever);
+    rec.line('C', `coefficient, a multiple ${multiple} of a bolt`, '', C, '', source);
   }
 
   recordPlateBlock(rec: Recorder): void {

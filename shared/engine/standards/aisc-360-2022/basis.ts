@@ -60,6 +60,7 @@ class AiscBasis implements Basis {
   readonly detailing = detailing;
   readonly modulus = E;
   readonly boltByBolt = true;
+  readonly centreNormalisation = 'ultimate' as const;
   private readonly ofRupture: number;
   private readonly ofYielding: number;
 

@@ -75,6 +75,11 @@ export function infoOf(format: Format): BasisInfo {
       },
       ...notes,
       {
+        id: 'centre',
+        text: 'The coefficient of the instantaneous centre is a multiple of the ultimate strength of a bolt.',
+        clause: 'AISC Manual, Part 7',
+      },
+      {
         id: 'prying',
         text: 'Prying by the published method of b, a, ρ and δ. Recent practice bends the plate with its tensile strength, older practice with its yield strength: the family says which, and yield, the lower, is the default. Beside shear a bolt keeps min(1, 1.3 − f_rv/F_cv) of its tension, applied whatever the share of either stress.',
         clause: 'AISC Manual Part 9, AISC 360 J3.8',

@@ -55,6 +55,7 @@ class CsaBasis implements Basis {
   readonly detailing = detailing;
   readonly modulus = E;
   readonly boltByBolt = false;
+  readonly centreNormalisation = 'atMaximum' as const;
 
   constructor(readonly factors: PartialFactors) {}
 

@@ -69,6 +69,11 @@ export const info: BasisInfo = {
       clause: 'CSA S16 13.4, 13.11',
     },
     {
+      id: 'centre',
+      text: 'The coefficient of the instantaneous centre is a multiple of the force of a bolt at its greatest deformation, as the CISC Handbook has it.',
+      clause: 'CISC Handbook, Part 3',
+    },
+    {
       id: 'prying',
       text: 'Prying by the published method of b, a, ρ and δ. Recent practice bends the plate with its tensile strength, older practice with its yield strength: the family says which, and yield, the lower, is the default. Beside shear a bolt keeps the circle √(1 − (V_f/V_r)²) of its tension.',
       clause: 'CSA S16 13.12.1.3, 13.12.1.4, CISC Handbook Part 3',

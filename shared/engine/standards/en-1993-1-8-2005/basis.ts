@@ -53,6 +53,7 @@ class EnBasis implements Basis {
   readonly detailing = detailing;
   readonly modulus = E;
   readonly boltByBolt = false;
+  readonly centreNormalisation = null;
 
   constructor(readonly factors: PartialFactors) {}
 

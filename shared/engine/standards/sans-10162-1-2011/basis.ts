@@ -55,6 +55,7 @@ class SansBasis implements Basis {
   readonly detailing = detailing;
   readonly modulus = E;
   readonly boltByBolt = false;
+  readonly centreNormalisation = 'ultimate' as const;
 
   constructor(readonly factors: PartialFactors) {}
 

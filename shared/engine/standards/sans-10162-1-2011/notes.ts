@@ -59,6 +59,11 @@ export const info: BasisInfo = {
       clause: 'SANS 10162-1 13.4, 13.11',
     },
     {
+      id: 'centre',
+      text: 'The coefficient of the instantaneous centre is a multiple of the ultimate strength of a bolt, as the AISC Manual has it: 1.9 % lower than by the force at the greatest deformation.',
+      clause: 'Crawford and Kulak, 1971',
+    },
+    {
       id: 'prying',
       text: 'Prying by the published method of b, a, ρ and δ. Recent practice bends the plate with its tensile strength, older practice with its yield strength: the family says which, and yield, the lower, is the default. Beside shear a bolt keeps the lower of the straight line 1.4 − V/V_r and the circle.',
       clause: 'SANS 10162-1 13.12.1.2, 13.12.1.3, published method',
