@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { ASD, capacities, CSA, LRFD, plain, prepare, SANS } from './support/fin-plate.ts';
+import { ASD, capacities, CSA, EN, LRFD, plain, prepare, SANS } from './support/fin-plate.ts';
 
 /**
  * The plain detail by hand, drilled holes of 24: plate 11 x 236, gross 2596, net 11 (236 - 3 d_h); 280/420 MPa;
@@ -127,5 +127,87 @@ describe.each([
     const bent = capacities(prepare(basis, { ...shear, shear_line: 'bolts' }), -90);
     const force = Math.hypot((6 * 95 * 118) / 236 ** 3, 1 / 472);
     expect(bent.WM!).toBeCloseTo((factor.rupture * 0.6 * 480 * 9) / Math.SQRT2 / force, 3);
+  });
+});
+
+describe.each([
+  [SANS, { yielding: 0.9, rupture: 0.765, hole: 24 }],
+  [CSA, { yielding: 0.9, rupture: 0.75, hole: 24 }],
+  [LRFD, { yielding: 0.9, rupture: 0.75, hole: 26 }],
+  [ASD, { yielding: 1 / 1.67, rupture: 1 / 2, hole: 26 }],
+] as const)('%s, sections with pull, shear and bending', (basis, factor) => {
+  const pulled = capacities(prepare(basis, { ...shear, shear_line: 'bolts' }), 60);
+
+  it('the plate at the weld', () => {
+    // N 0.5, V 0.86603, M 82.272 on 2596 mm2 and Z = 11 x 236^2/6 = 102 109.
+    const sigma = 0.5 / 2596 + 82.272 / 102_109.3;
+    const tau = 0.866025 / 2596;
+    const byHand = (factor.yielding * 280) / Math.hypot(sigma, Math.sqrt(3) * tau);
+    expect(pulled.PW! / byHand).toBeCloseTo(1, 5);
+  });
+
+  it('the plate at the first column, where the net section governs', () => {
+    // M = 0.86603 x 33; I = 236^3/12 - 3 d^3/12 - 2 d 75^2, all by 11.
+    const d = factor.hole;
+    const area = 11 * (236 - 3 * d);
+    const modulus = (11 * (236 ** 3 / 12 - d ** 3 / 4 - 2 * d * 75 ** 2)) / 118;
+    const sigma = 0.5 / area + (0.866025 * 33) / modulus;
+    const byHand = (factor.rupture * 420) / Math.hypot(sigma, (Math.sqrt(3) * 0.866025) / area);
+    expect(pulled.PH! / byHand).toBeCloseTo(1, 5);
+  });
+
+  it('pull on the web, and the coped section', () => {
+    const net = 8.5 * (236 - 3 * factor.hole);
+    const pull = Math.min(factor.yielding * 2006 * 345, factor.rupture * net * 460);
+    expect(capacities(prepare(basis, shear), 0).MT!).toBeCloseTo(pull, 6);
+    // Z = 239 672 as in EN; M = 103; far below its buckling.
+    const combined = Math.hypot(103 / 239_672, Math.sqrt(3) / 2796.5);
+    expect(capacities(prepare(basis, shear), -90).MC! / ((factor.yielding * 345) / combined)).toBeCloseTo(
+      1,
+      4,
+    );
+  });
+});
+
+describe('a long plate', () => {
+  const long = { ...plain, first_column: 162, fit_checks: 'waived', beam_gap: 113 } as const;
+  // M_cr/Z = pi h t^3 E/(6 z_p sqrt(2.6) Z) with E 200 000: 125.93e6/102 109 = 1233.3 MPa; e = 195.
+  const critical = (Math.PI * 236 * 11 ** 3 * 200_000) / Math.sqrt(2.6) / (6 * 162) / 102_109.3;
+
+  it('SANS and CSA: φ f_y (1 + λ^2n)^(−1/n), n = 1.34', () => {
+    const lambda = Math.sqrt(280 / critical);
+    const stress = 0.9 * 280 * (1 + lambda ** 2.68) ** (-1 / 1.34);
+    for (const basis of [SANS, CSA] as const) {
+      const found = capacities(prepare(basis, long), 90).PL!;
+      expect(found / ((stress * 102_109.3) / 195)).toBeCloseTo(1, 5);
+    }
+  });
+
+  it('AISC: 0.658^(F_y/F_e) F_y', () => {
+    const stress = 0.9 * 0.658 ** (280 / critical) * 280;
+    expect(capacities(prepare(LRFD, long), 90).PL! / ((stress * 102_109.3) / 195)).toBeCloseTo(1, 5);
+  });
+});
+
+describe('bolts by the instantaneous centre', () => {
+  const centre = { ...shear, bolt_group: 'centre' } as const;
+
+  it('carry at least what they carry elastically, and what they carry without moment at 0°', () => {
+    for (const basis of [SANS, CSA, LRFD, ASD] as const) {
+      for (const angle of [-90, -35, 10, 60, 90]) {
+        const found = capacities(prepare(basis, centre), angle);
+        const elastic = capacities(prepare(basis, shear), angle);
+        expect(found.BS!).toBeGreaterThan(elastic.BS!);
+        expect(found.PB).toBe(elastic.PB);
+      }
+    }
+    const pull = capacities(prepare(SANS, centre), 0).BS!;
+    // Six bolts of 102 180 N that deform alike to the greatest: R/R_ult = (1 - exp(-3.4))^0.55 = 0.98154.
+    expect(pull).toBeCloseTo(6 * 102_179.6 * 0.98154, -2);
+    expect(capacities(prepare(CSA, centre), 0).BS!).toBeCloseTo(6 * 102_179.6, -1);
+  });
+
+  it('are not for EN 1993', () => {
+    expect(capacities(prepare(EN, centre), 90)).toEqual(capacities(prepare(EN, shear), 90));
   });
 });

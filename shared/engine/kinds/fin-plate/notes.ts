@@ -7,7 +7,7 @@ export const notes: readonly string[] = [
   'The shear acts at the face of the support, in the middle of the bolts, or each part is taken for the line that is worse for it; what lies away from the line takes the moment V e.',
   'Unless the family goes by the load angle, the shear is taken up and down and the worse kept.',
   'The plate is welded on both sides over its full height; forces in the weld are elastic and its worst millimetre governs.',
-  'Bolts share the moment elastically, in proportion to their distance from the middle of the group, and the most loaded one governs.',
+  'Bolts share the moment elastically, in proportion to their distance from the middle of the group, and the most loaded one governs; where the family takes the instantaneous centre their shear is found by it, their bearing elastically all the same (errs low).',
   'Bearing is resolved along the edges of plate and web and combined as the root of the sum of squares; blocks torn along and across the face are combined the same way: the method of this catalogue.',
   'The welded edge of the plate is no free edge. The lap is on one side of the web: its small twist is not covered.',
   'The plate at the first column is checked on its gross section against yield and on its net section against rupture.',
