@@ -94,7 +94,7 @@ export type ParameterValues = Readonly<Record<string, ParameterValue>>;
 export type ParameterType =
   'length' | 'number' | 'count' | 'choice' | 'steel' | 'boltSize' | 'boltGrade' | 'electrode' | 'section';
 
-export type ParameterGroup = 'support' | 'plate' | 'weld' | 'bolts' | 'member' | 'beam' | 'method';
+export type ParameterGroup = 'support' | 'plate' | 'cleat' | 'weld' | 'bolts' | 'member' | 'beam' | 'method';
 
 /** One line of a kind's schema: everything a form, a file or a script must know of a parameter. */
 export interface ParameterSpec {

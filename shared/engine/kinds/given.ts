@@ -32,6 +32,19 @@ export function isUsed({ bases, when }: ParameterSpec, values: Resolved, basis: 
   return when === undefined || when.is.includes(values.text(when.parameter));
 }
 
+/** Whether a choice of a schema has that value and the basis and the other choices use it. */
+export function isChosen(
+  specs: readonly ParameterSpec[],
+  values: Resolved,
+  basis: Basis,
+  name: string,
+  value: string,
+): boolean {
+  if (values.choice(name) !== value) return false;
+  const spec = specs.find((one) => one.name === name);
+  return spec !== undefined && isUsed(spec, values, basis);
+}
+
 /** Yield and tensile strength of one part. */
 export function recordSteel(label: string, steel: Steel, rec: Recorder): void {
   rec.line('f_y', `${label}, ${steel.name}`, '', steel.fy, 'MPa', '');

@@ -41,25 +41,34 @@ const weldedPart = ({ name, fy, fu }: Steel, thickness: number, fillets: number)
   fillets,
 });
 
+/** Before the names of a bolt's parameters: a kind with two bolts names those at the support apart. */
+export type BoltPrefix = '' | 'support_';
+
 /** The normal round hole of the basis for the chosen bolt, mm, or null where it lists none. */
-export function normalHole(values: Resolved, basis: Basis): number | null {
-  const { size, catalogued } = values.size('bolt_size');
+export function normalHole(values: Resolved, basis: Basis, prefix: BoltPrefix = ''): number | null {
+  const { size, catalogued } = values.size(`${prefix}bolt_size`);
   return basis.normalHole(size, catalogued);
 }
 
 /** Reads the bolt with its hole. */
-export function boltOf(values: Resolved, basis: Basis, planes: number, jointLength: number): BoltInShear {
-  const { size } = values.size('bolt_size');
-  const choice = values.grade('bolt_grade');
+export function boltOf(
+  values: Resolved,
+  basis: Basis,
+  planes: number,
+  jointLength: number,
+  prefix: BoltPrefix = '',
+): BoltInShear {
+  const { size } = values.size(`${prefix}bolt_size`);
+  const choice = values.grade(`${prefix}bolt_grade`);
   const grade = 'given' in choice ? choice.given : basis.grade(choice.catalogued, size.d);
-  const hole = values.number('hole_diameter');
+  const hole = values.number(`${prefix}hole_diameter`);
   return {
     size,
     grade: grade ?? noGrade,
     // A size without a hole of its own is a fault unless the hole is given.
-    holeDiameter: hole === 0 ? (normalHole(values, basis) ?? size.d) : hole,
+    holeDiameter: hole === 0 ? (normalHole(values, basis, prefix) ?? size.d) : hole,
     planes,
-    threadsInPlane: values.choice('threads') === 'in_plane',
+    threadsInPlane: values.choice(`${prefix}threads`) === 'in_plane',
     jointLength,
   };
 }

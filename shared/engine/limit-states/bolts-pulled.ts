@@ -17,7 +17,7 @@ export class PulledBolts {
    */
   constructor(
     private readonly basis: Basis,
-    private readonly stub: StubRows,
+    private readonly stub: Pick<StubRows, 'pull'>,
     private readonly tension: number,
     private readonly shear: number,
   ) {}

@@ -19,13 +19,19 @@ interface Block {
   readonly pull: BlockPull;
 }
 
+/** How the block at the end of a web or a plate is pulled: unevenly, as at a coped beam end, or evenly. */
+export function endPull(group: UprightGroup, eccentric: boolean): BlockPull {
+  if (!eccentric) return 'even';
+  return group.columns === 1 ? 'coped-one-line' : 'coped-two-lines';
+}
+
 /**
  * Block shear along the face, N: the corner between the bolts and the two free edges, torn up or down. The shear
  * plane runs along the column farthest from the free side to the edge ahead, the tension plane from that column to
  * the free side at the last row.
  * @param ahead from the outer row to the edge ahead, mm
  * @param side from the outer column to the free side, mm
- * @param eccentric the tension plane is pulled unevenly, as at a coped beam end
+ * @param pull how the tension plane is pulled
  */
 export function blockAlong(
   basis: Basis,
@@ -33,11 +39,10 @@ export function blockAlong(
   group: UprightGroup,
   ahead: number,
   side: number,
-  eccentric: boolean,
+  pull: BlockPull,
   rec: Rec,
 ): number {
   const { rows, columns } = group;
-  const uneven = columns === 1 ? 'coped-one-line' : 'coped-two-lines';
   const corner = strengthOf(
     basis,
     ply,
@@ -47,7 +52,7 @@ export function blockAlong(
       shearHoles: rows - 0.5,
       tension: groupWidth(group) + side,
       tensionHoles: columns - 0.5,
-      pull: eccentric ? uneven : 'even',
+      pull,
     },
     rec,
   );

@@ -175,6 +175,8 @@ export interface Detailing {
   greatestEdge(t: number, exposed: boolean): number;
   /** By the thicker or the thinner part joined, mm. */
   leastWeldLeg(thicker: number, thinner: number): number;
+  /** Along an edge of a part of thickness t, mm. */
+  greatestWeldLeg(t: number): number;
   leastWeldThroat(): number;
   leastWeldLength(leg: number): number;
   greatestHole(d: number): number;

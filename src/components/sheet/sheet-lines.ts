@@ -7,6 +7,7 @@ import { unitAfter, valueTitle } from '../../composables/value-title.ts';
 const GROUPS: readonly (readonly [string, string])[] = [
   ['support', 'Support'],
   ['plate', 'Plate'],
+  ['cleat', 'Cleats'],
   ['weld', 'Weld'],
   ['bolts', 'Bolts'],
   ['member', 'Connected member'],

@@ -1,4 +1,4 @@
-import { blockAcross, blockAlong } from '../../limit-states/upright-block.ts';
+import { blockAcross, blockAlong, endPull } from '../../limit-states/upright-block.ts';
 import { groupHeight, type UprightGroup } from '../../limit-states/upright-group.ts';
 import type { Basis, Rec } from '../../standards/basis.ts';
 import { type BeamEnd, isCoped } from './beam.ts';
@@ -17,7 +17,7 @@ export function webBlockAlong(
   rec: Rec,
 ): number {
   const ahead = up ? beam.edges.above : beam.edges.below;
-  return blockAlong(basis, beam.web, group, ahead, beam.edges.near, eccentric, rec);
+  return blockAlong(basis, beam.web, group, ahead, beam.edges.near, endPull(group, eccentric), rec);
 }
 
 /** A block of the web torn towards the end of the beam by a pull, N. */

@@ -1,5 +1,5 @@
 import { alignedBearing } from '../../limit-states/bearing.ts';
-import { blockAlong } from '../../limit-states/upright-block.ts';
+import { blockAlong, endPull } from '../../limit-states/upright-block.ts';
 import { weldLineCapacity } from '../../limit-states/weld-line.ts';
 import type { BearingStrength, ClauseKey, Rec } from '../../standards/basis.ts';
 import type { FailingPart } from '../../types.ts';
@@ -84,7 +84,8 @@ export function plateShearNet(m: EndPlateModel, rec: Rec): number {
 /** A corner of the plate torn along the face on both sides of the web, N. */
 export function plateBlock(m: EndPlateModel, rec: Rec): number {
   if (rec !== null) rec.line('', 'corners', 'one on each side of the web', 2, '', '');
-  return 2 * blockAlong(m.basis, m.ply, m.group, m.endDistance, m.edgeDistance, m.eccentricBlock, rec);
+  const pull = endPull(m.group, m.eccentricBlock);
+  return 2 * blockAlong(m.basis, m.ply, m.group, m.endDistance, m.edgeDistance, pull, rec);
 }
 
 /** Shear of all bolts, N. */

@@ -13,7 +13,7 @@ import type {
   HoleMaking,
 } from '../../standards/basis.ts';
 import type { ISection, Steel } from '../../types.ts';
-import { isUsed } from '../given.ts';
+import { isChosen } from '../given.ts';
 import { boltOf, noGrade, normalHole, noSteel, plateOf, type WeldedPlate } from '../parts.ts';
 import { type Resolved, steelAt } from '../resolved.ts';
 import { methodParameters } from './parameters.ts';
@@ -110,7 +110,9 @@ export function buildModel(values: Resolved, basis: Basis): EndPlateModel {
     m,
     edge: Math.max(1, edgeDistance),
   });
-  const boltShare = isChosen(values, basis, 'support_bolts', 'reduced') ? HANDBOOK.bolts : 1;
+  const boltShare = isChosen(methodParameters, values, basis, 'support_bolts', 'reduced')
+    ? HANDBOOK.bolts
+    : 1;
   const oneBolt = basis.boltShear(bolt, null);
   const boltTension = tensionOf(basis, bolt, plate);
   const weld = weldOf(values, basis, plate, section, beamSteel, height);
@@ -164,8 +166,10 @@ export function buildModel(values: Resolved, basis: Basis): EndPlateModel {
     boltToWeb,
     m,
     boltShare,
-    grossShearFactor: isChosen(values, basis, 'gross_shear', 'reduced') ? HANDBOOK.shear : 1,
-    webShare: isChosen(values, basis, 'web_shear', 'reduced') ? HANDBOOK.web : 1,
+    grossShearFactor: isChosen(methodParameters, values, basis, 'gross_shear', 'reduced')
+      ? HANDBOOK.shear
+      : 1,
+    webShare: isChosen(methodParameters, values, basis, 'web_shear', 'reduced') ? HANDBOOK.web : 1,
     eccentricBlock: values.choice('block_pull') === 'eccentric',
     fitWaived: values.choice('fit_checks') === 'waived',
     practiceWaived: values.choice('practice_rules') === 'waived',
@@ -212,11 +216,4 @@ function weldOf(
   const clear = Math.min(height, depth - 2 * (flangeThickness + rootRadius));
   const deducted = values.choice('weld_ends') === 'deducted' ? fillet.runOut : 0;
   return { fillet, length: Math.max(1, clear - deducted) };
-}
-
-/** Whether a method is chosen and the basis has that choice. */
-function isChosen(values: Resolved, basis: Basis, name: string, value: string): boolean {
-  if (values.choice(name) !== value) return false;
-  const spec = methodParameters.find((one) => one.name === name);
-  return spec !== undefined && isUsed(spec, values, basis);
 }

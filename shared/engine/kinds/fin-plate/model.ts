@@ -7,12 +7,13 @@ import { groupHeight, groupWidth, type UprightGroup } from '../../limit-states/u
 import type { Basis, BoltInShear, EdgeFinish, FilletStrength, HoleMaking } from '../../standards/basis.ts';
 import { type BeamEnd, beamEndOf } from '../beam-end/beam.ts';
 import { type CopedSection, copedSectionOf } from '../beam-end/coped-section.ts';
-import { isUsed } from '../given.ts';
+import { isChosen } from '../given.ts';
+import { bearingOf } from '../lap.ts';
 import { boltOf, noGrade, noSteel, plateOf, type WeldedPlate } from '../parts.ts';
 import type { Resolved } from '../resolved.ts';
 import { TOLERANCE } from '../rules.ts';
 import { type Lines, linesOf } from './lines.ts';
-import { bearingOf, weldOf } from './model-parts.ts';
+import { weldOf } from './model-parts.ts';
 import { methodParameters } from './parameters-method.ts';
 
 /** Everything about one fin plate that does not change with the load angle. N, mm, MPa; y from the middle of the bolts. */
@@ -82,7 +83,7 @@ export function buildModel(values: Resolved, basis: Basis): FinPlateModel {
     above: layout.endDistance,
     below: layout.endDistance,
   };
-  const lap = { values, basis, bolt, group, oneBolt };
+  const lap = { values, basis, bolt, group, oneBolt, single: true };
   // Spelled out: copying whole objects is most of the work of a variant in a sweep.
   return {
     thickness,
@@ -112,7 +113,9 @@ export function buildModel(values: Resolved, basis: Basis): FinPlateModel {
     bothWays: eitherWay && Math.abs(beam.edges.above - beam.edges.below) > TOLERANCE,
     plastic: values.choice('plate_section') === 'plastic',
     eccentricBlock: values.choice('block_pull') === 'eccentric',
-    grossShearFactor: isChosen(values, basis, 'gross_shear', 'reduced') ? HANDBOOK_SHEAR : 1,
+    grossShearFactor: isChosen(methodParameters, values, basis, 'gross_shear', 'reduced')
+      ? HANDBOOK_SHEAR
+      : 1,
     fitWaived: values.choice('fit_checks') === 'waived',
     practiceWaived: values.choice('practice_rules') === 'waived',
     ply: { thickness, deduction, fy, fu },
@@ -152,11 +155,4 @@ function coefficientsFor(values: Resolved, basis: Basis, group: UprightGroup): P
   const { rows, columns, pitch, gauge } = group;
   if (values.choice('bolt_group') !== 'centre' || basis.centreNormalisation === null) return null;
   return coefficientsOf(rows, columns, pitch, gauge, basis.centreNormalisation);
-}
-
-/** Whether a method is chosen and the basis has that choice. */
-function isChosen(values: Resolved, basis: Basis, name: string, value: string): boolean {
-  if (values.choice(name) !== value) return false;
-  const spec = methodParameters.find((one) => one.name === name);
-  return spec !== undefined && isUsed(spec, values, basis);
 }

@@ -1,5 +1,5 @@
 import { lateralMoment, shortPlateReach } from '../../limit-states/lateral-stability.ts';
-import { blockAcross, blockAlong } from '../../limit-states/upright-block.ts';
+import { blockAcross, blockAlong, endPull } from '../../limit-states/upright-block.ts';
 import type { Rec } from '../../standards/basis.ts';
 import type { Recorder } from '../../types.ts';
 import {
@@ -99,7 +99,7 @@ export class Strengths {
 
   private alongPlate(rec: Rec): number {
     const { basis, ply, group, endDistance, edgeDistance, eccentricBlock } = this.m;
-    return blockAlong(basis, ply, group, endDistance, edgeDistance, eccentricBlock, rec);
+    return blockAlong(basis, ply, group, endDistance, edgeDistance, endPull(group, eccentricBlock), rec);
   }
 
   private acrossPlate(rec: Rec): number {

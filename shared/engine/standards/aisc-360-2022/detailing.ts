@@ -55,6 +55,11 @@ export function leastSpacing(d: number, dh: number): number {
   return Math.max((8 / 3) * d, dh + d);
 }
 
+/** Greatest fillet leg along the edge of a part, mm: t, and t − 2 from 6 mm up. ANSI/AISC 360-22, J2.2b(b). */
+export function greatestFilletLeg(t: number): number {
+  return t < 6 ? t : t - 2;
+}
+
 /** Spacing, edges, holes and weld sizes. ANSI/AISC 360-22, J2.2b, J3.3 to J3.6. */
 export const detailing: Detailing = {
   clauses: {
@@ -72,6 +77,7 @@ export const detailing: Detailing = {
   leastEnd: (d) => leastEdgeDistance(d),
   greatestEdge: (t) => Math.min(12 * t, 150),
   leastWeldLeg: (_thicker, thinner) => leastFilletLeg(thinner),
+  greatestWeldLeg: greatestFilletLeg,
   leastWeldThroat: () => 0,
   leastWeldLength: (leg) => 4 * leg,
   greatestHole,

@@ -33,6 +33,11 @@ export function greatestHole(d: number): number {
   return d === 24 ? 27 : d + 2;
 }
 
+/** Greatest fillet leg along the edge of a part, mm: t, and t − 2 from 6 mm up. CSA W59 (from memory). */
+export function greatestFilletLeg(t: number): number {
+  return t < 6 ? t : t - 2;
+}
+
 /** Spacing, edges, holes and weld sizes. CSA S16:19, clause 22.3 and Table 6; CSA W59. */
 export const detailing: Detailing = {
   clauses: {
@@ -51,6 +56,7 @@ export const detailing: Detailing = {
     Math.max(leastEdgeDistance(d, finish), boltsInLine <= 2 ? 1.5 * d : 0),
   greatestEdge: (t) => Math.min(12 * t, 150),
   leastWeldLeg: leastFilletLeg,
+  greatestWeldLeg: greatestFilletLeg,
   leastWeldThroat: () => 0,
   leastWeldLength: (leg) => Math.max(40, 4 * leg),
   greatestHole,

@@ -30,6 +30,7 @@ export const detailing: Detailing = {
   leastEnd: (_d, d0) => 1.2 * d0,
   greatestEdge: (t, exposed) => (exposed ? 4 * t + 40 : Infinity),
   leastWeldLeg: () => 0,
+  greatestWeldLeg: () => Infinity,
   leastWeldThroat: () => 3,
   leastWeldLength: (leg) => Math.max(30, (6 * leg) / Math.SQRT2),
   greatestHole: (d) => d + oversizeClearance(d),

@@ -28,6 +28,11 @@ export function leastFilletLeg(thicker: number): number {
   return thicker <= 20 ? 6 : 8;
 }
 
+/** Greatest fillet leg along the edge of a part, mm: t, and t − 2 from 6 mm up. Welding practice to SANS 10162-1. */
+export function greatestFilletLeg(t: number): number {
+  return t < 6 ? t : t - 2;
+}
+
 /** Spacing, edges, holes and weld sizes. SANS 10162-1:2011, clause 22.3 and Table 6; weld sizes by its welding practice. */
 export const detailing: Detailing = {
   clauses: {
@@ -46,6 +51,7 @@ export const detailing: Detailing = {
     Math.max(leastEdgeDistance(d, finish), boltsInLine <= 2 ? 1.5 * d : 0),
   greatestEdge: (t) => Math.min(12 * t, 150),
   leastWeldLeg: leastFilletLeg,
+  greatestWeldLeg: greatestFilletLeg,
   leastWeldThroat: () => 0,
   leastWeldLength: (leg) => Math.max(40, 4 * leg),
   // M24 may have 27 mm; from M27 up the fabrication standard allows 3 mm.
