@@ -1,4 +1,5 @@
 import type { Basis, BlockPull, Rec } from '../standards/basis.ts';
+import { byBoth } from './resultant.ts';
 import { groupHeight, groupWidth, type PlyEdges, type UprightGroup } from './upright-group.ts';
 
 /** A ply that holds an upright group: thickness and hole as deducted, mm; strengths, MPa. */
@@ -81,6 +82,17 @@ export function blockAcross(
     least = Math.min(least, strengthOf(basis, ply, block, rec));
   }
   return least;
+}
+
+/** Blocks torn along and across the face at once, as the root of the sum of squares, N: the project's method. */
+export function blocksTogether(along: number, across: number, cos: number, sin: number, rec: Rec): number {
+  if (rec !== null) {
+    const method = 'method of this catalogue';
+    rec.line('R_V', 'block torn along the face', 'the least', along, 'N', '');
+    rec.line('R_N', 'block torn across the face', 'the least', across, 'N', '');
+    rec.line('', 'together', '√((V/R_V)² + (N/R_N)²) ≤ 1', 'as the root of the sum of squares', '', method);
+  }
+  return byBoth(along, across, cos, sin);
 }
 
 function blocksAcross(

@@ -14,6 +14,7 @@ import {
   type SheetSection,
 } from '../../types.ts';
 import { webShearGross, webShearNet } from '../beam-end/strengths.ts';
+import { partBearing, webBearing, webBoltShear } from '../beam-end/web-bolts.ts';
 import {
   governing,
   recordLimitStates,
@@ -117,13 +118,13 @@ export class FinPlateDetail implements PreparedDetail {
     out[6] = byComponent(s.plateTension, cos);
     out[7] = limits.plateBlock(s, cos, sin, null);
     out[8] = limits.plateStability(model, s, sin, null);
-    out[9] = limits.boltShear(model, s, cos, sin, null);
-    out[10] = limits.plateBearing(model, cos, sin, null);
-    out[11] = limits.webBearing(model, cos, sin, null);
-    out[12] = byComponent(s.webShearGross, sin);
-    out[13] = byComponent(s.webShearNet, sin);
-    out[14] = limits.webBlock(model, s, cos, sin, null);
-    out[15] = limits.webPull(model, s, cos, sin, null);
+    out[9] = webBoltShear(model, cos, sin, null);
+    out[10] = partBearing(model, model.plateBearing, cos, sin, null);
+    out[11] = webBearing(model, cos, sin, null);
+    out[12] = byComponent(s.web.shearGross, sin);
+    out[13] = byComponent(s.web.shearNet, sin);
+    out[14] = s.web.block(cos, sin, null);
+    out[15] = s.web.pull(cos, sin, null);
     out[16] = limits.copedSection(model, cos, sin, null);
   }
 
@@ -141,13 +142,13 @@ export class FinPlateDetail implements PreparedDetail {
       (r) => byComponent(plateTension(model, r), cos),
       (r) => limits.plateBlock(s, cos, sin, r),
       (r) => limits.plateStability(model, s, sin, r),
-      (r) => limits.boltShear(model, s, cos, sin, r),
-      (r) => limits.plateBearing(model, cos, sin, r),
-      (r) => limits.webBearing(model, cos, sin, r),
+      (r) => webBoltShear(model, cos, sin, r),
+      (r) => partBearing(model, model.plateBearing, cos, sin, r),
+      (r) => webBearing(model, cos, sin, r),
       (r) => byComponent(webShearGross(basis, beam, r), sin),
       (r) => byComponent(webShearNet(basis, beam, group, r), sin),
-      (r) => limits.webBlock(model, s, cos, sin, r),
-      (r) => limits.webPull(model, s, cos, sin, r),
+      (r) => s.web.block(cos, sin, r),
+      (r) => s.web.pull(cos, sin, r),
       (r) => limits.copedSection(model, cos, sin, r),
     ];
   }

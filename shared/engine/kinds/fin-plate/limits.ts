@@ -1,12 +1,12 @@
 import { lateralMoment } from '../../limit-states/lateral-stability.ts';
 import { netSectionCapacity } from '../../limit-states/net-section.ts';
 import { plateSectionCapacity } from '../../limit-states/plate-section.ts';
-import { byBoth, byComponent } from '../../limit-states/resultant.ts';
+import { byComponent } from '../../limit-states/resultant.ts';
+import { blocksTogether } from '../../limit-states/upright-block.ts';
 import { weldLineCapacity } from '../../limit-states/weld-line.ts';
 import type { ClauseKey, Rec } from '../../standards/basis.ts';
 import type { FailingPart } from '../../types.ts';
 import { copedSectionCapacity } from '../beam-end/coped-section.ts';
-import { webTension } from '../beam-end/strengths.ts';
 import type { FinPlateModel } from './model.ts';
 import type { Strengths } from './strengths.ts';
 
@@ -92,100 +92,14 @@ export function plateStability(m: FinPlateModel, s: Strengths, sin: number, rec:
   return byComponent(s.lateralMoment, sin * m.lines.eccentricity);
 }
 
-/** The most loaded bolt in shear, N: for each line of shear, the worse kept. */
-export function boltShear(m: FinPlateModel, s: Strengths, cos: number, sin: number, rec: Rec): number {
-  let least = Infinity;
-  for (const lever of m.lines.boltLevers) {
-    const capacity = m.oneBolt * s.boltMultiplier(cos, sin, lever);
-    least = Math.min(least, capacity);
-  }
-  if (rec !== null) s.recordBolts(cos, sin, rec);
-  return least;
-}
-
-/** Bearing on the plate by the elastic forces of the bolts, N. */
-export function plateBearing(m: FinPlateModel, cos: number, sin: number, rec: Rec): number {
-  let least = Infinity;
-  let worst = 0;
-  for (const lever of m.lines.boltLevers) {
-    m.forces.load(cos, sin, lever * sin);
-    const capacity = m.plateBearing.capacity(m.forces.fx, m.forces.fy, 1, null);
-    if (capacity < least) {
-      least = capacity;
-      worst = lever;
-    }
-  }
-  if (rec !== null) {
-    rec.line('M_b', 'moment on the bolts of a unit resultant', '', worst * sin, 'mm', '');
-    m.forces.load(cos, sin, worst * sin);
-    m.plateBearing.capacity(m.forces.fx, m.forces.fy, 1, rec);
-  }
-  return least;
-}
-
-/** Bearing on the web, which the bolts push the other way, N: up and down where the family asks for both. */
-export function webBearing(m: FinPlateModel, cos: number, sin: number, rec: Rec): number {
-  let least = Infinity;
-  let worst = 0;
-  let worstSin = sin;
-  for (let way = 1; way >= (m.bothWays ? -1 : 1); way -= 2) {
-    for (const lever of m.lines.boltLevers) {
-      m.forces.load(cos, way * sin, lever * way * sin);
-      const capacity = m.webBearing.capacity(m.forces.fx, m.forces.fy, -1, null);
-      if (capacity < least) {
-        least = capacity;
-        worst = lever;
-        worstSin = way * sin;
-      }
-    }
-  }
-  if (rec !== null) {
-    rec.line('M_b', 'moment on the bolts of a unit resultant', '', worst * worstSin, 'mm', '');
-    m.forces.load(cos, worstSin, worst * worstSin);
-    m.webBearing.capacity(m.forces.fx, m.forces.fy, -1, rec);
-  }
-  return least;
-}
-
 /** Blocks of the plate torn along and across the face together, N. */
 export function plateBlock(s: Strengths, cos: number, sin: number, rec: Rec): number {
   if (rec !== null) s.recordPlateBlock(rec);
-  return blocks(s.plateBlockAlong, s.plateBlockAcross, cos, sin, rec);
-}
-
-/** Blocks of the web torn along and across the face together, N; the bolts push the web against the resultant. */
-export function webBlock(m: FinPlateModel, s: Strengths, cos: number, sin: number, rec: Rec): number {
-  const pushedUp = sin < 0;
-  const along = m.eitherWay ? s.webBlockLeast : pushedUp ? s.webBlockUp : s.webBlockDown;
-  if (rec !== null) s.recordWebBlock(along === s.webBlockUp, rec);
-  return blocks(along, s.webBlockAcross, cos, sin, rec);
-}
-
-/** Pull on the web beside its shear, as the root of the sum of squares, N; Infinity where nothing pulls. */
-export function webPull(m: FinPlateModel, s: Strengths, cos: number, sin: number, rec: Rec): number {
-  if (cos === 0) return Infinity;
-  const shear = Math.min(s.webShearGross, s.webShearNet);
-  if (rec !== null) {
-    webTension(m.basis, m.beam, m.group, m.height, rec);
-    rec.line('V_r', 'the web in shear, gross or net', 'the lesser', shear, 'N', '');
-    const meaning = 'as the root of the sum of squares';
-    rec.line('', 'together', '√((V/V_r)² + (N/N_r)²) ≤ 1', meaning, '', 'method of this catalogue');
-  }
-  return byBoth(shear, s.webTension, cos, sin);
+  return blocksTogether(s.plateBlockAlong, s.plateBlockAcross, cos, sin, rec);
 }
 
 /** Pull, shear and bending of the beam where its copes begin, N; Infinity where it has none. */
 export function copedSection(m: FinPlateModel, cos: number, sin: number, rec: Rec): number {
   if (m.coped === null) return Infinity;
   return copedSectionCapacity(m.beam, m.coped, m.lines.nearest, cos, sin, rec);
-}
-
-function blocks(along: number, across: number, cos: number, sin: number, rec: Rec): number {
-  if (rec !== null) {
-    const method = 'method of this catalogue';
-    rec.line('R_V', 'block torn along the face', 'the least', along, 'N', '');
-    rec.line('R_N', 'block torn across the face', 'the least', across, 'N', '');
-    rec.line('', 'together', '√((V/R_V)² + (N/R_N)²) ≤ 1', 'as the root of the sum of squares', '', method);
-  }
-  return byBoth(along, across, cos, sin);
 }

@@ -2,7 +2,7 @@ import type { Basis, FilletSpec } from '../../standards/basis.ts';
 import { weldedParts, type WeldedPlate } from '../parts.ts';
 import type { Resolved } from '../resolved.ts';
 import { TOLERANCE } from '../rules.ts';
-import type { Lines } from './lines.ts';
+import type { Lines } from '../beam-end/shear-lines.ts';
 
 /** Both fillets of the plate: their strength, counted length, and the leg of a full-strength weld. mm. */
 export function weldOf(values: Resolved, basis: Basis, plate: WeldedPlate, height: number, lines: Lines) {

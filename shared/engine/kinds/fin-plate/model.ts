@@ -12,7 +12,7 @@ import { bearingOf } from '../lap.ts';
 import { boltOf, noGrade, noSteel, plateOf, type WeldedPlate } from '../parts.ts';
 import type { Resolved } from '../resolved.ts';
 import { TOLERANCE } from '../rules.ts';
-import { type Lines, linesOf } from './lines.ts';
+import { type Lines, linesOf } from '../beam-end/shear-lines.ts';
 import { weldOf } from './model-parts.ts';
 import { methodParameters } from './parameters-method.ts';
 

@@ -2,13 +2,7 @@ import { lateralMoment, shortPlateReach } from '../../limit-states/lateral-stabi
 import { blockAcross, blockAlong, endPull } from '../../limit-states/upright-block.ts';
 import type { Rec } from '../../standards/basis.ts';
 import type { Recorder } from '../../types.ts';
-import {
-  webBlockAcross,
-  webBlockAlong,
-  webShearGross,
-  webShearNet,
-  webTension,
-} from '../beam-end/strengths.ts';
+import { WebStrengths } from '../beam-end/web-strengths.ts';
 import type { FinPlateModel } from './model.ts';
 
 /** What the load angle does not change, worked out once. N, N mm, MPa. */
@@ -20,18 +14,12 @@ export class Strengths {
   readonly plateBlockAcross: number;
   /** Infinity for a short plate. */
   readonly lateralMoment: number;
-  readonly webShearGross: number;
-  readonly webShearNet: number;
-  readonly webBlockUp: number;
-  readonly webBlockDown: number;
-  readonly webBlockLeast: number;
-  readonly webBlockAcross: number;
-  readonly webTension: number;
+  readonly web: WebStrengths;
   /** Design stress of the plate in rupture. */
   readonly ruptureStress: number;
 
   constructor(private readonly m: FinPlateModel) {
-    const { basis, beam, group, firstColumn, thickness, height } = m;
+    const { basis, firstColumn, thickness, height } = m;
     this.plateShearGross = plateShearGross(m, null);
     this.plateShearNet = plateShearNet(m, null);
     this.plateTension = plateTension(m, null);
@@ -41,60 +29,13 @@ export class Strengths {
       firstColumn > shortPlateReach(thickness)
         ? lateralMoment(basis, thickness, height, firstColumn, m.plate.fy, null)
         : Infinity;
-    this.webShearGross = webShearGross(basis, beam, null);
-    this.webShearNet = webShearNet(basis, beam, group, null);
-    this.webBlockUp = webBlockAlong(basis, beam, group, true, m.eccentricBlock, null);
-    this.webBlockDown = webBlockAlong(basis, beam, group, false, m.eccentricBlock, null);
-    this.webBlockLeast = Math.min(this.webBlockUp, this.webBlockDown);
-    this.webBlockAcross = webBlockAcross(basis, beam, group, null);
-    this.webTension = webTension(basis, beam, group, height, null);
+    this.web = new WebStrengths(m);
     this.ruptureStress = basis.tensionRupture(1, m.plate.fu, null);
-  }
-
-  /** Resultants of 1 N that the bolts carry for each newton of one bolt's shear. */
-  boltMultiplier(cos: number, sin: number, lever: number): number {
-    const { coefficients, forces } = this.m;
-    if (coefficients !== null) return coefficients.coefficient(sin, lever * sin);
-    forces.load(cos, sin, lever * sin);
-    return 1 / forces.most;
-  }
-
-  recordBolts(cos: number, sin: number, rec: Recorder): void {
-    const { m } = this;
-    m.basis.boltShear(m.bolt, rec);
-    for (const lever of m.lines.boltLevers) {
-      const where = lever === 0 ? 'shear at the bolts' : 'shear at the face of the support';
-      rec.line('M_b', `moment on the bolts, ${where}`, 'V × lever', lever * sin, 'mm', '');
-      if (m.coefficients !== null) {
-        this.recordCentre(cos, sin, lever, rec);
-        continue;
-      }
-      rec.line('Σr²', 'about the middle of the bolts', '', m.forces.polar, 'mm²', '');
-      const most = 1 / this.boltMultiplier(cos, sin, lever);
-      rec.line('F/R', 'most loaded bolt, unit resultant', '√(F_x² + F_y²)', most, 'N per N', '');
-    }
-  }
-
-  private recordCentre(cos: number, sin: number, lever: number, rec: Recorder): void {
-    const source = 'instantaneous centre: Crawford and Kulak, 1971';
-    const multiple =
-      this.m.basis.centreNormalisation === 'atMaximum'
-        ? 'of the force at the greatest deformation'
-        : 'of the ultimate strength';
-    const C = this.boltMultiplier(cos, sin, lever);
-    rec.line('C', `coefficient, a multiple ${multiple} of a bolt`, '', C, '', source);
   }
 
   recordPlateBlock(rec: Recorder): void {
     this.alongPlate(rec);
     this.acrossPlate(rec);
-  }
-
-  recordWebBlock(up: boolean, rec: Recorder): void {
-    const { basis, beam, group, eccentricBlock } = this.m;
-    rec.line('', 'block along the face', '', up ? 'torn up' : 'torn down', '', '');
-    webBlockAlong(basis, beam, group, up, eccentricBlock, rec);
-    webBlockAcross(basis, beam, group, rec);
   }
 
   private alongPlate(rec: Rec): number {
