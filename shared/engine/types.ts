@@ -14,7 +14,7 @@ export type * from './engine-catalogue.ts';
 
 export type BasisId =
   'sans-10162-1-2011' | 'csa-s16-2019' | 'en-1993-1-8-2005' | 'aisc-360-2022-lrfd' | 'aisc-360-2022-asd';
-export type KindId = 'gusset-plate' | 'fin-plate' | 'end-plate';
+export type KindId = 'gusset-plate' | 'fin-plate' | 'end-plate' | 'angle-cleats';
 
 /** Yield and tensile strength of a piece at its own thickness. MPa. */
 export interface Steel {

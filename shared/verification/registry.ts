@@ -1,6 +1,7 @@
 import { aiscChecks } from './aisc/index.ts';
 import type { Check } from './check.ts';
 import { csaChecks } from './csa/index.ts';
+import { angleCleats } from './details/angle-cleats.ts';
 import { endPlates } from './details/end-plate.ts';
 import { finPlates } from './details/fin-plate.ts';
 import { gussetPlatesNorthAmerica } from './details/gusset-north-american.ts';
@@ -34,4 +35,5 @@ export const checks: readonly Check[] = [
   ...gussetPlatesNorthAmerica,
   ...finPlates,
   ...endPlates,
+  ...angleCleats,
 ];

@@ -99,7 +99,7 @@ describe('clauses', () => {
 
 describe('the public door', () => {
   it('finds kinds and bases by name, and nothing by another', () => {
-    expect(kinds.map(({ id }) => id)).toEqual(['gusset-plate', 'fin-plate', 'end-plate']);
+    expect(kinds.map(({ id }) => id)).toEqual(['gusset-plate', 'fin-plate', 'end-plate', 'angle-cleats']);
     expect(bases.map(({ id, resultLabel }) => [id, resultLabel])).toEqual([
       ['sans-10162-1-2011', 'factored resistance'],
       ['csa-s16-2019', 'factored resistance'],

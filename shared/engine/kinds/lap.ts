@@ -1,7 +1,7 @@
 import { GroupBearing } from '../limit-states/group-bearing.ts';
 import type { PlyEdges, UprightGroup } from '../limit-states/upright-group.ts';
 import type { Basis, BearingPly, BoltInShear } from '../standards/basis.ts';
-import { normalHole } from './parts.ts';
+import { type BoltPrefix, normalHole } from './parts.ts';
 import type { Resolved } from './resolved.ts';
 
 /** What the plies of a lap share: its bolts, in level rows and in columns along the face of the support. */
@@ -13,6 +13,8 @@ export interface Lap {
   readonly oneBolt: number;
   /** Bolts in one shear plane, between two plies. */
   readonly single: boolean;
+  /** Before the names of the bolt's parameters. */
+  readonly prefix?: BoltPrefix;
 }
 
 /** Bearing on one ply; a basis may hold it down across a single column or a single row. */
@@ -23,7 +25,7 @@ export function bearingOf(lap: Lap, thickness: number, fu: number, edges: PlyEdg
     size: bolt.size,
     grade: bolt.grade,
     holeDiameter: bolt.holeDiameter,
-    normalHole: normalHole(values, basis) ?? bolt.holeDiameter,
+    normalHole: normalHole(values, basis, lap.prefix) ?? bolt.holeDiameter,
     thickness,
     fu,
     singleLapOneRow,

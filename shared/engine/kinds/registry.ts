@@ -1,4 +1,5 @@
 import type { DetailKind, KindId } from '../types.ts';
+import { angleCleats } from './angle-cleats/index.ts';
 import { endPlate } from './end-plate/index.ts';
 import { finPlate } from './fin-plate/index.ts';
 import { gussetPlate } from './gusset-plate/index.ts';
@@ -8,6 +9,7 @@ const registry: Readonly<Record<KindId, DetailKind>> = {
   'gusset-plate': gussetPlate,
   'fin-plate': finPlate,
   'end-plate': endPlate,
+  'angle-cleats': angleCleats,
 };
 
 export const kinds: readonly DetailKind[] = Object.values(registry);
