@@ -49,8 +49,8 @@ export class AngleCleatsDetail implements PreparedDetail {
   readonly limitStates: readonly LimitStateInfo[];
   readonly rejections: readonly Rejection[];
   readonly quantities: Quantities;
-  private readonly sound: boolean;
-  private readonly strengths: Strengths;
+  /** Null where a rule is broken: such a detail has no strengths. */
+  private readonly strengths: Strengths | null;
   private readonly scratch = new Float64Array(limitStates.length);
 
   constructor(private readonly model: CleatModel) {
@@ -62,17 +62,16 @@ export class AngleCleatsDetail implements PreparedDetail {
       clause: model.basis.clauses[clause],
     }));
     this.rejections = rejectionsOf(model);
-    this.sound = this.rejections.length === 0;
     this.quantities = quantitiesOf(model);
-    this.strengths = new Strengths(model);
+    this.strengths = this.rejections.length === 0 ? new Strengths(model) : null;
   }
 
   at(theta: number, sense: Sense, out: Float64Array): number {
     if (sense !== 'tension' || !(Math.abs(theta) <= STEEPEST + 1e-9)) return NOT_COVERED;
     const cos = component(Math.cos(theta));
     if (cos > 0 && !this.model.pullCovered) return NOT_COVERED;
-    if (!this.sound) return NOT_PERMITTED;
-    this.evaluate(cos, component(Math.sin(theta)), out);
+    if (this.strengths === null) return NOT_PERMITTED;
+    this.evaluate(this.strengths, cos, component(Math.sin(theta)), out);
     return governing(out, limitStates.length);
   }
 
@@ -93,11 +92,11 @@ export class AngleCleatsDetail implements PreparedDetail {
     const cos = component(Math.cos(theta));
     const sin = component(Math.sin(theta));
     recordGiven(this.model, theta, cos, sin, rec);
-    if (outcome.status === 'capacity') {
-      recordLimitStates(this.limitStates, this.work(cos, sin), rec);
+    if (outcome.status === 'capacity' && this.strengths !== null) {
+      recordLimitStates(this.limitStates, this.work(this.strengths, cos, sin), rec);
       const { resultLabel } = this.model.basis.info;
       recordResult(this.limitStates[outcome.governing], resultLabel, outcome.capacity, rec);
-    } else recordRejections(outcome.rejections, rec);
+    } else recordRejections(this.rejections, rec);
     recordNotes(notesOf(this.model), this.model.basis, rec);
     return rec.sections;
   }
@@ -113,8 +112,8 @@ export class AngleCleatsDetail implements PreparedDetail {
   }
 
   /** The hot path: what the angle does not change was worked out before. */
-  private evaluate(cos: number, sin: number, out: Float64Array): void {
-    const { model: m, strengths: s } = this;
+  private evaluate(s: Strengths, cos: number, sin: number, out: Float64Array): void {
+    const { model: m } = this;
     out[0] = webBoltShear(m, cos, sin, null);
     out[1] = partBearing(m, m.cleatBearing, cos, sin, null);
     out[2] = webBearing(m, cos, sin, null);
@@ -141,8 +140,8 @@ export class AngleCleatsDetail implements PreparedDetail {
   }
 
   /** The same functions in the same order, each writing its working. */
-  private work(cos: number, sin: number): readonly ((rec: Rec) => number)[] {
-    const { model: m, strengths: s } = this;
+  private work(s: Strengths, cos: number, sin: number): readonly ((rec: Rec) => number)[] {
+    const { model: m } = this;
     const { basis, beam, group } = m;
     return [
       (r) => webBoltShear(m, cos, sin, r),

@@ -3,6 +3,7 @@ import type { AngleSection, Steel } from '../../types.ts';
 import { usualBackmark } from '../backmark.ts';
 import { noSteel } from '../parts.ts';
 import { type Resolved, steelAt } from '../resolved.ts';
+import { TOLERANCE } from '../rules.ts';
 
 /** One angle and its two legs, the heel at the face of the support and against the web. mm, MPa. */
 export interface Legs {
@@ -37,7 +38,8 @@ export function legsOf(values: Resolved): Legs {
     pitch: values.number('pitch'),
     gauge: values.number('gauge'),
   };
-  const length = values.number('cleat_length');
+  const wanted = values.number('cleat_length');
+  const length = wanted <= TOLERANCE ? 0 : wanted;
   const given = values.number('cleat_end_distance');
   const height = length === 0 ? groupHeight(group) + 2 * given : length;
   const backmark = values.number('web_backmark');

@@ -72,7 +72,8 @@ export function buildModel(values: Resolved, basis: Basis): CleatModel {
   const eitherWay = values.choice('shear_direction') === 'either';
   const thickness = cleats * legs.thickness;
   const lap = { values, basis, bolt, group, oneBolt, single: cleats === 1 };
-  const supportThickness = values.number('support_thickness');
+  const given = values.number('support_thickness');
+  const supportThickness = given <= TOLERANCE ? 0 : given;
   const support =
     steelAt(values.steel('support_steel'), supportThickness || legs.thickness, steel) ?? noSteel;
   const web = beam.web.thickness;
@@ -110,8 +111,8 @@ export function buildModel(values: Resolved, basis: Basis): CleatModel {
     coefficients: coefficientsFor(values, basis, group),
     support,
     supportThickness,
-    bolts: welded ? null : supportBoltsOf(values, basis, legs, support, web),
-    weld: welded ? supportWeldOf(values, basis, legs, support, web) : null,
+    bolts: welded ? null : supportBoltsOf(values, basis, legs, support, supportThickness, web),
+    weld: welded ? supportWeldOf(values, basis, legs, support, supportThickness, web) : null,
     pullCovered: !(welded && cleats === 1 && values.choice('heel') === 'free'),
   };
 }

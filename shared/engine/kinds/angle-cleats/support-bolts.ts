@@ -1,4 +1,4 @@
-import { coefficientsOf } from '../../groups/ic-cache.ts';
+import { coefficientsOf, type PatternCoefficients } from '../../groups/ic-cache.ts';
 import { PulledBolts } from '../../limit-states/bolts-pulled.ts';
 import { HingedLeg } from '../../limit-states/hinged-leg.ts';
 import { StubRows } from '../../limit-states/t-stub.ts';
@@ -40,12 +40,10 @@ export interface SupportBolts {
   readonly tension: number;
   /** From the bolts to the line of the shear in the plane of the support; 0 where it does not count. */
   readonly lever: number;
-  /** Coefficient of the instantaneous centre of one leg, or null where its bolts share elastically. */
-  readonly coefficient: number | null;
+  /** Coefficients of the instantaneous centre, or null where bolts share elastically. */
+  readonly coefficients: PatternCoefficients | null;
   /** Forces of one leg's bolts for a shear of 1 N on all cleats. */
   readonly forces: UprightForces;
-  /** Shear on the most loaded bolt for a shear of 1 N on all cleats. */
-  readonly perShear: number;
   /** All legs in bending under the pull, N, for a tension that each bolt may take. */
   readonly legs: Pick<StubRows, 'pull'>;
   readonly pulled: PulledBolts;
@@ -57,6 +55,7 @@ export function supportBoltsOf(
   basis: Basis,
   legs: Legs,
   support: Steel,
+  supportThickness: number,
   webThickness: number,
 ): SupportBolts {
   const prefix: BoltPrefix = values.choice('support_connection') === 'bolted_own' ? 'support_' : '';
@@ -67,7 +66,7 @@ export function supportBoltsOf(
   const deduction = bolt.holeDiameter + basis.holeAllowance(values.choice<HoleMaking>('hole_making'));
   const oneBolt = basis.boltShear(bolt, null);
   const share = isChosen(methodParameters, values, basis, 'support_bolts', 'reduced') ? HANDBOOK_SHARE : 1;
-  const tension = tensionOf(basis, bolt, legs, values.number('support_thickness'), support);
+  const tension = tensionOf(basis, bolt, legs, supportThickness, support);
   const sharing = sharingOf(values, basis, legs, place, webThickness);
   const inBending = legsInBending(values, basis, legs, place, bolt, deduction);
   return {
@@ -84,9 +83,8 @@ export function supportBoltsOf(
     share,
     tension,
     lever: sharing.lever,
-    coefficient: sharing.coefficient,
+    coefficients: sharing.coefficients,
     forces: sharing.forces,
-    perShear: sharing.perShear,
     legs: inBending,
     pulled: new PulledBolts(basis, inBending, tension, share * oneBolt),
   };
@@ -130,15 +128,15 @@ function sharingOf(values: Resolved, basis: Basis, legs: Legs, place: Place, web
   forces.load(0, 1 / cleats, lever / cleats);
   const normalise = basis.centreNormalisation;
   const byCentre = lever > 0 && values.choice('bolt_group') === 'centre' && normalise !== null;
-  const coefficient = byCentre
-    ? coefficientsOf(group.rows, 1, group.pitch, 0, normalise).coefficient(1, lever)
-    : null;
-  return {
-    lever,
-    forces,
-    coefficient,
-    perShear: coefficient === null ? forces.most : 1 / (cleats * coefficient),
-  };
+  const coefficients = byCentre ? coefficientsOf(group.rows, 1, group.pitch, 0, normalise) : null;
+  return { lever, forces, coefficients };
+}
+
+/** Shear on the most loaded bolt for a shear of 1 N on all cleats. */
+export function shearOnWorst({ coefficients, forces, lever, count, group }: SupportBolts): number {
+  if (coefficients === null) return forces.most;
+  const legs = count / group.rows;
+  return 1 / (legs * coefficients.coefficient(1, lever));
 }
 
 /** The legs of a pair are a T-stub; a single one is half of it, or bends about its bolts alone where its heel may turn. */

@@ -6,7 +6,7 @@ import { recordCentre } from '../beam-end/web-bolts.ts';
 import { bearingOf } from '../lap.ts';
 import { normalHole } from '../parts.ts';
 import type { CleatModel } from './model.ts';
-import type { SupportBolts } from './support-bolts.ts';
+import { shearOnWorst, type SupportBolts } from './support-bolts.ts';
 
 const METHOD = 'method of this catalogue';
 
@@ -61,7 +61,7 @@ export function supportBoltShear(m: CleatModel, rec: Rec): number {
       rec.line('', meaning, '0.8 Σ F_v,Rd', bolts.share, '', 'common practice');
     }
   }
-  return (bolts.share * bolts.oneBolt) / bolts.perShear;
+  return (bolts.share * bolts.oneBolt) / shearOnWorst(bolts);
 }
 
 function recordSharing(m: CleatModel, bolts: SupportBolts, rec: NonNullable<Rec>): void {
@@ -70,9 +70,10 @@ function recordSharing(m: CleatModel, bolts: SupportBolts, rec: NonNullable<Rec>
     const meaning = 'bolts to the line of the shear, in the plane of the support';
     rec.line('e_s', meaning, '', bolts.lever, 'mm', '');
     rec.line('Σr²', 'of one leg', '', bolts.forces.polar, 'mm²', '');
-    if (bolts.coefficient !== null) recordCentre(m.basis, bolts.coefficient, rec);
+    const { coefficients, lever } = bolts;
+    if (coefficients !== null) recordCentre(m.basis, coefficients.coefficient(1, lever), rec);
   }
-  rec.line('v/V', 'most loaded bolt, unit shear', '√(F_x² + F_y²)', bolts.perShear, 'N per N', '');
+  rec.line('v/V', 'most loaded bolt, unit shear', '√(F_x² + F_y²)', shearOnWorst(bolts), 'N per N', '');
 }
 
 /** Bolts at the support under the pull with prying, N; Infinity where nothing pulls. */
@@ -86,7 +87,7 @@ export function supportBoltsPulled(m: CleatModel, cos: number, rec: Rec): number
 export function supportBoltsTogether(m: CleatModel, cos: number, sin: number, rec: Rec): number {
   if (m.bolts === null || cos <= 0 || sin === 0) return Infinity;
   if (rec !== null) recordTension(m, m.bolts, rec);
-  return m.bolts.pulled.together(Math.abs(sin) * m.bolts.perShear, cos, rec);
+  return m.bolts.pulled.together(Math.abs(sin) * shearOnWorst(m.bolts), cos, rec);
 }
 
 function recordTension(m: CleatModel, bolts: SupportBolts, rec: NonNullable<Rec>): void {

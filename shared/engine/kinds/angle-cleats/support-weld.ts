@@ -27,11 +27,12 @@ export function supportWeldOf(
   basis: Basis,
   legs: Legs,
   support: Steel,
+  supportThickness: number,
   webThickness: number,
 ): SupportWeld {
   const leg = values.number('weld_leg');
   const { thickness, steel, cleats } = legs;
-  const behind = values.number('support_thickness') || thickness;
+  const behind = supportThickness || thickness;
   const part = ({ name, fy, fu }: Steel, t: number) => ({ name, fy, fu, thickness: t, fillets: 1 });
   const fillet = basis.fillet({
     leg,
