@@ -10,6 +10,8 @@ import type { StubRows } from './t-stub.ts';
 export class PulledBolts {
   private v = 0;
   private t = 0;
+  /** Pull that the stub carries without any shear, N. */
+  private readonly most: number;
 
   /**
    * @param tension tension strength of one bolt, N
@@ -20,14 +22,18 @@ export class PulledBolts {
     private readonly stub: Pick<StubRows, 'pull'>,
     private readonly tension: number,
     private readonly shear: number,
-  ) {}
+  ) {
+    this.most = stub.pull(tension, null);
+  }
 
   /** Pull alone, N; Infinity for a push. @param t pull on all bolts for R = 1 N */
   pulled(t: number, rec: Rec): number {
     if (t <= 0) return Infinity;
-    const pull = this.stub.pull(this.tension, rec);
-    if (rec !== null) rec.line('t', 'pull for R = 1', '', t, '', '');
-    return pull / t;
+    if (rec !== null) {
+      this.stub.pull(this.tension, rec);
+      rec.line('t', 'pull for R = 1', '', t, '', '');
+    }
+    return this.most / t;
   }
 
   /**
@@ -38,7 +44,7 @@ export class PulledBolts {
     if (t <= 0) return Infinity;
     this.v = v / this.shear;
     this.t = t;
-    const most = this.stub.pull(this.tension, null) / t;
+    const most = this.most / t;
     const high = this.v > 0 ? Math.min(most, 1 / this.v) : most;
     const R = rootOfFalling(this, high);
     if (rec !== null) {

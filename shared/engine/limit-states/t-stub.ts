@@ -90,7 +90,9 @@ export class StubRows {
   pull(boltTension: number, rec: Rec): number {
     const { basis, share } = this;
     let alone = 0;
-    for (const { name, stub, times } of this.alone) {
+    // By index: the search for a root comes here many times for every cell.
+    for (let i = 0; i < this.alone.length; i++) {
+      const { name, stub, times } = this.alone[i]!;
       if (rec !== null) rec.line('', name, '', times === 1 ? 'once' : `${times} times`, '', '');
       alone += times * basis.tStub(stub, boltTension, rec);
     }
