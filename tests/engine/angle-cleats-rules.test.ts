@@ -147,3 +147,20 @@ describe('the notes of a sheet', () => {
     expect(notes[1]).toMatch(/thickness of the support is not given/);
   });
 });
+
+describe('every line of a sheet', () => {
+  it('is a finite number or words, with no strength of bolts that are not there', () => {
+    for (const basis of [EN, CSA, AISC] as const) {
+      for (const values of [plain, welded, { ...plain, cleats: 1 }, { ...plain, shear_line: 'bolts' }]) {
+        for (const angle of [0, 40, 90]) {
+          if (prepare(basis, values).outcome(toRadians(angle), 'tension').status !== 'capacity') continue;
+          for (const { id, lines } of prepare(basis, values).record(toRadians(angle), 'tension')) {
+            for (const { symbol, value } of lines) {
+              if (typeof value === 'number') expect(Math.abs(value), `${id} ${symbol}`).toBeLessThan(1e8);
+            }
+          }
+        }
+      }
+    }
+  });
+});

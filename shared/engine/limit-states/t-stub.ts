@@ -106,6 +106,29 @@ export class StubRows {
   }
 }
 
+/** Bolts too strong to give way: what is left is the flange. N. */
+const STRONG_BOLTS = 1e12;
+
+/** Above this a force on a sheet is only the strength of bolts that are not there, N. */
+const OF_BOLTS = 1e10;
+
+/**
+ * Pull that the flange carries by itself, N, its bolts taken as too strong to give way; what the sheet would say of them is
+ * left out.
+ * @param what the flange in words, e.g. `the plate alone`
+ */
+export function flangeAlone(stub: Pick<StubRows, 'pull'>, what: string, rec: Rec): number {
+  if (rec === null) return stub.pull(STRONG_BOLTS, null);
+  rec.line('B', 'bolts that do not give way', '', what, '', '');
+  return stub.pull(STRONG_BOLTS, {
+    section: (id, title) => rec.section(id, title),
+    line: (symbol, meaning, formula, value, unit, clause) => {
+      if (symbol === 't_c' || (typeof value === 'number' && value > OF_BOLTS)) return;
+      rec.line(symbol, meaning, formula, value, unit, clause);
+    },
+  });
+}
+
 function stubOf(spec: StubRowsSpec, { circular, other }: Lengths, bolts: number, tributary: number): TStub {
   const { thickness, steel, byTensile, bolt, holeDiameter, boltToWeb, m, edge } = spec;
   const leff1 = Math.min(circular, other);

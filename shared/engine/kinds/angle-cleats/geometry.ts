@@ -59,12 +59,13 @@ function dimensionsOf(m: CleatModel): Dimension[] {
     text: number(to - from),
     offset: -30,
   });
-  const upright = (from: number, to: number, text: string): Dimension => {
+  // Beside the toe: on the other side stand the bolts at the support.
+  const upright = (from: number, to: number, text: string, offset = -30): Dimension => {
     const at = (y: number): Point => ({ x: webLeg, y });
-    return { from: at(from), to: at(to), text, offset: -30 };
+    return { from: at(from), to: at(to), text, offset };
   };
   const dimensions = [
-    { from: { x: 0, y: low }, to: { x: 0, y: half }, text: number(height), offset: 30 },
+    upright(low, half, number(height), -60),
     level(0, firstColumn),
     level(lastColumn, webLeg),
     upright(low, lowest, number(endDistance)),

@@ -53,6 +53,8 @@ function recordLegs({ legs }: CleatModel, rec: Recorder): void {
 function recordSupport(m: CleatModel, rec: Recorder): void {
   const { bolts } = m;
   if (bolts === null) return;
+  const same = bolts.prefix === '' ? 'those in the web' : 'of their own';
+  rec.line('', 'bolts at the support', '', same, '', '');
   if (bolts.prefix !== '') recordBolt(bolts.bolt, bolts.deduction, rec);
   rec.line('n_s', 'rows in each outstanding leg', '', bolts.group.rows, '', '');
   rec.line('p_s', 'pitch at the support', '', bolts.group.pitch, 'mm', '');

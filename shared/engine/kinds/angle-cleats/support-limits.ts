@@ -1,5 +1,6 @@
 import { alignedBearing } from '../../limit-states/bearing.ts';
 import { byBoth } from '../../limit-states/resultant.ts';
+import { flangeAlone } from '../../limit-states/t-stub.ts';
 import { weldLineCapacity, type WeldPart } from '../../limit-states/weld-line.ts';
 import type { BearingPly, Rec } from '../../standards/basis.ts';
 import { recordCentre } from '../beam-end/web-bolts.ts';
@@ -10,15 +11,9 @@ import { shearOnWorst, type SupportBolts } from './support-bolts.ts';
 
 const METHOD = 'method of this catalogue';
 
-/** Bolts too strong to give way: what is left is the legs. N. */
-const STRONG_BOLTS = 1e12;
-
 /** All outstanding legs in bending under a pull, N, with fasteners that do not give way. */
 export function legBending(m: CleatModel, rec: Rec): number {
-  if (m.bolts !== null) {
-    if (rec !== null) rec.line('B', 'bolts that do not give way', '', 'the legs alone', '', '');
-    return m.bolts.legs.pull(STRONG_BOLTS, rec);
-  }
+  if (m.bolts !== null) return flangeAlone(m.bolts.legs, 'the legs alone', rec);
   const { thickness, outstandingLeg, steel, cleats } = m.legs;
   const fyd = m.basis.yieldStress(steel.fy);
   const moment = 0.25 * thickness * thickness * m.height * fyd;

@@ -1,4 +1,5 @@
 import { alignedBearing } from '../../limit-states/bearing.ts';
+import { flangeAlone } from '../../limit-states/t-stub.ts';
 import { blockAlong, endPull } from '../../limit-states/upright-block.ts';
 import { weldLineCapacity } from '../../limit-states/weld-line.ts';
 import type { BearingStrength, ClauseKey, Rec } from '../../standards/basis.ts';
@@ -40,9 +41,6 @@ export const limitStates = [
   state('web-section', 'MW', 'Web of the beam in shear and pull', 'member', 'plateSection'),
 ] as const;
 
-/** Bolts too strong to give way: what is left is the plate. N. */
-const STRONG_BOLTS = 1e12;
-
 /** Weld metal on its worst millimetre, N. */
 export function weldMetal(m: EndPlateModel, cos: number, sin: number, rec: Rec): number {
   return weldLineCapacity(m.fillet, 'metal', cos, sin, 0, m.weldLength, rec);
@@ -56,8 +54,7 @@ export function weldBaseMetal(m: EndPlateModel, cos: number, sin: number, rec: R
 
 /** The T-stub of the plate with bolts that do not give way, N. */
 export function plateBending(m: EndPlateModel, rec: Rec): number {
-  if (rec !== null) rec.line('B', 'bolts that do not give way', '', 'the plate alone', '', '');
-  return m.stub.pull(STRONG_BOLTS, rec);
+  return flangeAlone(m.stub, 'the plate alone', rec);
 }
 
 /** Gross section of the plate on both sides of the web, with the handbook factor where the family takes it, N. */

@@ -66,7 +66,8 @@ export class AiscBearing implements BearingStrength {
     rec.line('r_b', 'bearing, one bolt', `${c} d t F_u ${given}`, this.bearing, 'N', CLAUSE);
     if (lc !== Infinity)
       rec.line('r_t', 'tear-out, one bolt', `${k} l_c t F_u ${given}`, tearOut, 'N', CLAUSE);
-    rec.line('r_v', 'shear of one bolt, all planes', '', this.ply.boltShear, 'N', 'AISC 360 J3.7');
+    if (this.ply.boltShear !== Infinity)
+      rec.line('r_v', 'shear of one bolt, all planes', '', this.ply.boltShear, 'N', 'AISC 360 J3.7');
     rec.line('r', 'what the bolt takes', 'the least', strength, 'N', 'AISC 360 J3.7');
   }
 }
