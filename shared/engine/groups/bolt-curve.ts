@@ -28,3 +28,8 @@ export type BoltNormalisation = 'ultimate' | 'atMaximum';
 export function boltForceRatio(t: number, curve: BoltCurve = BOLT_CURVE): number {
   return Math.pow(-Math.expm1(-curve.decay * t), curve.power);
 }
+
+/** Deformation over Δ_max at which a bolt has the force `ratio` times R_ult, below 1. */
+export function boltDeformation(ratio: number, curve: BoltCurve = BOLT_CURVE): number {
+  return -Math.log1p(-Math.pow(ratio, 1 / curve.power)) / curve.decay;
+}

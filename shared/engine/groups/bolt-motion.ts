@@ -1,4 +1,4 @@
-import { BOLT_CURVE, type BoltCurve } from './bolt-curve.ts';
+import { BOLT_CURVE, boltForceRatio, type BoltCurve } from './bolt-curve.ts';
 import type { BoltGroup } from './bolt-group.ts';
 import type { MotionState, RigidGroup } from './rigid-motion.ts';
 
@@ -30,6 +30,26 @@ export class BoltMotion implements RigidGroup {
     const most = this.reach(q);
     for (let i = 0; i < 3; i++) q[i] = q[i]! / most;
     this.respond(state, lastStep);
+  }
+
+  /**
+   * Force of each bolt at `q`, x and y in turn.
+   * @returns the least motion of a bolt over Δ_max
+   */
+  forcesAt(q: Float64Array, out: Float64Array): number {
+    let least = Infinity;
+    const { count, dx, dy, radius } = this.group;
+    const turn = q[2]! / radius;
+    for (let i = 0; i < count; i++) {
+      const ux = q[0]! - turn * dy[i]!;
+      const uy = q[1]! + turn * dx[i]!;
+      const moved = Math.max(Math.sqrt(ux * ux + uy * uy), 1e-150);
+      const secant = boltForceRatio(moved, this.curve) / moved;
+      out[2 * i] = secant * ux;
+      out[2 * i + 1] = secant * uy;
+      least = Math.min(least, moved);
+    }
+    return least;
   }
 
   /** Forces and stiffness at `q` as it is, with 1 the motion at Δ_max. */

@@ -22,3 +22,16 @@ export function unitLoadThrough(angle: number, x: number, y: number): GroupLoad 
 export function momentAbout(load: GroupLoad, x: number, y: number): number {
   return load.moment - (x * load.fy - y * load.fx);
 }
+
+/**
+ * Writes force and moment, the latter over a length, into `out` as a vector of length 1.
+ * @returns the length that it had; 0 for a load that is zero or not finite
+ */
+export function unitVector({ fx, fy }: GroupLoad, momentOverLength: number, out: Float64Array): number {
+  const size = Math.hypot(fx, fy, momentOverLength);
+  if (!(size > 0) || !Number.isFinite(size)) return 0;
+  out[0] = fx / size;
+  out[1] = fy / size;
+  out[2] = momentOverLength / size;
+  return size;
+}

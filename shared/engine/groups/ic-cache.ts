@@ -2,7 +2,7 @@ import type { BoltNormalisation } from './bolt-curve.ts';
 import { boltGroup, boltPattern } from './bolt-group.ts';
 import { boltGroupIc } from './bolt-group-ic.ts';
 
-/** Coefficients that are kept; beyond it the oldest pattern goes. */
+/** Coefficients that are kept; beyond it all are dropped when the next pattern is asked for. */
 const MOST = 200_000;
 
 /** The coefficients of one pattern of bolts by load line; symmetric, so that signs do not matter. */

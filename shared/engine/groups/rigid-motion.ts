@@ -100,6 +100,20 @@ function descend(group: RigidGroup, state: MotionState, g: Float64Array): number
   return 0;
 }
 
+/** Writes into `q` the unit motion at an angle `from` the load `g` (a unit vector), in the direction `about` it; radians. */
+export function moveFrom(g: Float64Array, from: number, about: number, q: Float64Array): void {
+  const [x, y, z] = [g[0]!, g[1]!, g[2]!];
+  const flat = Math.hypot(x, y);
+  // Two directions square to the load and to each other; a moment alone has any.
+  const [u, v] = flat > 0 ? [-y / flat, x / flat] : [1, 0];
+  const one = Math.sin(from) * Math.cos(about);
+  const other = Math.sin(from) * Math.sin(about);
+  const along = Math.cos(from);
+  q[0] = along * x + one * u - other * z * v;
+  q[1] = along * y + one * v + other * z * u;
+  q[2] = along * z + other * (x * v - y * u);
+}
+
 export function dot(a: Float64Array, b: Float64Array): number {
   return a[0]! * b[0]! + a[1]! * b[1]! + a[2]! * b[2]!;
 }

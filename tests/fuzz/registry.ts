@@ -1,0 +1,5 @@
+import type { Fuzzer } from './fuzzer.ts';
+import { groupFuzzers } from './groups.ts';
+
+/** Every fuzzer that `npm run fuzz` knows. */
+export const fuzzers: readonly Fuzzer[] = [...groupFuzzers];
