@@ -1,3 +1,5 @@
+import { benchExpressions } from './expressions.ts';
 import { benchSpreadsheet } from './spreadsheet.ts';
 
+benchExpressions();
 benchSpreadsheet();
