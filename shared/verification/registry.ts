@@ -11,7 +11,9 @@ import { enBolts } from './en/bolts.ts';
 import { enTension } from './en/tension.ts';
 import { enWelds } from './en/welds.ts';
 import { enWorkedExamples } from './en/worked-examples.ts';
+import { boltExamples } from './groups/bolt-examples.ts';
 import { boltTables } from './groups/bolt-tables.ts';
+import { weldExamples } from './groups/weld-examples.ts';
 import { weldTables } from './groups/weld-tables.ts';
 import { sansRuleEvaluations } from './sans/rule-evaluations.ts';
 import { sansSameExpression } from './sans/same-expression.ts';
@@ -30,7 +32,9 @@ export const checks: readonly Check[] = [
   ...csaChecks,
   ...aiscChecks,
   ...boltTables,
+  ...boltExamples,
   ...weldTables,
+  ...weldExamples,
   ...gussetPlates,
   ...gussetPlatesNorthAmerica,
   ...finPlates,

@@ -1,5 +1,8 @@
-/** e_x in, bolts, C. AISC Manual Table 7-6: one line of bolts 3 in apart, load along the line. From memory. */
-export const oneLine: readonly (readonly [ex: number, bolts: number, C: number])[] = [
+/** e_x in, bolts in a line, C. */
+export type BoltEntry = readonly [ex: number, bolts: number, C: number];
+
+/** AISC Manual Table 7-6: one line of bolts 3 in apart, load along the line. From memory. */
+export const oneLine: readonly BoltEntry[] = [
   [2, 2, 1.18],
   [2, 4, 3.32],
   [2, 5, 4.39],
@@ -10,6 +13,7 @@ export const oneLine: readonly (readonly [ex: number, bolts: number, C: number])
   [2, 10, 9.53],
   [2, 11, 10.5],
   [2, 12, 11.5],
+  [3, 2, 0.88],
   [3, 3, 1.75],
   [3, 4, 2.81],
   [3, 5, 3.9],
@@ -19,6 +23,7 @@ export const oneLine: readonly (readonly [ex: number, bolts: number, C: number])
   [3, 9, 8.17],
   [3, 11, 10.2],
   [3, 12, 11.3],
+  [4, 2, 0.69],
   [4, 3, 1.4],
   [4, 4, 2.36],
   [4, 5, 3.4],
@@ -29,6 +34,7 @@ export const oneLine: readonly (readonly [ex: number, bolts: number, C: number])
   [4, 10, 8.78],
   [4, 11, 9.84],
   [4, 12, 10.9],
+  [5, 2, 0.56],
   [5, 3, 1.15],
   [5, 4, 2.01],
   [5, 6, 3.98],
@@ -38,6 +44,8 @@ export const oneLine: readonly (readonly [ex: number, bolts: number, C: number])
   [5, 10, 8.3],
   [5, 11, 9.38],
   [5, 12, 10.4],
+  [6, 2, 0.48],
+  [6, 3, 0.97],
   [6, 4, 1.73],
   [6, 6, 3.55],
   [6, 7, 4.57],
@@ -48,25 +56,38 @@ export const oneLine: readonly (readonly [ex: number, bolts: number, C: number])
   [6, 12, 9.96],
 ];
 
-/** e_x in, bolts in a line, C. AISC Manual Table 7-7: two lines 3 in apart. From memory. */
-export const twoLines: readonly (readonly [ex: number, bolts: number, C: number])[] = [
+/** Entries of Table 7-6 that no exact solution gives: each lies a little more than half a unit of its last place above. */
+export const oneLineBeyond: readonly BoltEntry[] = [
+  [2, 3, 2.23],
+  [3, 10, 9.21],
+  [5, 5, 2.96],
+  [6, 5, 2.59],
+];
+
+/** AISC Manual Table 7-7: two lines 3 in apart, bolts 3 in apart, load along the lines. From memory. */
+export const twoLines: readonly BoltEntry[] = [
+  [2, 1, 0.84],
   [2, 2, 2.54],
   [2, 3, 4.48],
   [2, 4, 6.59],
   [2, 5, 8.72],
   [2, 6, 10.8],
+  [3, 1, 0.65],
   [3, 2, 2.03],
   [3, 3, 3.68],
   [3, 4, 5.67],
   [3, 5, 7.77],
+  [4, 1, 0.54],
   [4, 2, 1.67],
   [4, 3, 3.06],
   [4, 4, 4.86],
   [4, 5, 6.84],
+  [5, 1, 0.45],
   [5, 2, 1.42],
   [5, 3, 2.59],
   [5, 4, 4.21],
   [5, 5, 6.01],
+  [6, 1, 0.39],
   [6, 2, 1.22],
   [6, 3, 2.25],
   [6, 4, 3.69],
@@ -74,7 +95,7 @@ export const twoLines: readonly (readonly [ex: number, bolts: number, C: number]
   [6, 6, 7.17],
 ];
 
-/** Bolts, C' in. AISC Manual Table 7-6: moment alone. From memory. */
+/** Bolts in a line, C' in inches. AISC Manual Table 7-6, moment alone. From memory. */
 export const momentAlone: readonly (readonly [bolts: number, C: number])[] = [
   [2, 2.94],
   [3, 5.89],
@@ -87,6 +108,3 @@ export const momentAlone: readonly (readonly [bolts: number, C: number])[] = [
   [10, 69.2],
   [11, 83.5],
 ];
-
-/** Entries that differ from any exact solution by more than half a unit of their last place. */
-export const beyondRounding = 14;
