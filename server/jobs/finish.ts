@@ -54,7 +54,7 @@ async function summarise(
 ): Promise<ResultSummary> {
   const tally = { lowest: Infinity, highest: -Infinity, rejected: new Uint32Array(256) };
   for (let from = 0; from < grid.variantCount; from += BATCH) await countCells(app, revisionId, from, tally);
-  const legend = ruleLegend(kind);
+  const legend = ruleLegend(kind, definition.rules);
   const some = tally.lowest !== Infinity;
   return {
     ...layout(grid),

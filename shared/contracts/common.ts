@@ -45,6 +45,8 @@ export const faultSchema = z.object({
   field: z.string(),
   message: z.string(),
   value: z.unknown().optional(),
+  /** In an expression: places of the first character at fault and after the last. */
+  place: z.object({ start: z.number().int(), end: z.number().int() }).optional(),
 });
 export type Fault = z.infer<typeof faultSchema>;
 

@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { EXPRESSION_LIMITS } from '../expressions/types.ts';
 
 /**
  * A family's definition: the kind, the basis, and how each parameter varies.
@@ -17,7 +18,12 @@ export const LIMITS = {
   cells: 20_000_000,
   angles: 721,
   increments: [0.1, 0.5, 1, 2, 5, 10],
+  /** Characters of an expression. */
+  expression: EXPRESSION_LIMITS.length,
+  rules: 20,
 } as const;
+
+const expressionSchema = z.string().min(1).max(LIMITS.expression);
 
 export const parameterSettingSchema = z.discriminatedUnion('mode', [
   z.strictObject({ mode: z.literal('fixed'), value: parameterValueSchema }),
@@ -31,8 +37,16 @@ export const parameterSettingSchema = z.discriminatedUnion('mode', [
     to: z.number(),
     step: z.number().positive(),
   }),
+  z.strictObject({ mode: z.literal('derived'), expression: expressionSchema }),
 ]);
 export type ParameterSetting = z.infer<typeof parameterSettingSchema>;
+
+/** A rule of the family: a variant for which the expression does not hold is rejected with the message. */
+export const familyRuleSchema = z.strictObject({
+  expression: expressionSchema,
+  message: z.string().trim().min(3).max(160),
+});
+export type FamilyRule = z.infer<typeof familyRuleSchema>;
 
 /** Load angles in degrees. */
 export const angleGridSchema = z.discriminatedUnion('mode', [
@@ -56,6 +70,8 @@ export const definitionSchema = z.strictObject({
   kind: z.string().min(1).max(40),
   basis: z.string().min(1).max(40),
   parameters: z.record(z.string().max(40), parameterSettingSchema),
+  /** Left out where there is none, so that definitions without rules keep their canonical form. */
+  rules: z.array(familyRuleSchema).max(LIMITS.rules).optional(),
   angles: angleGridSchema,
   senses: z.array(senseSchema).min(1).max(2),
   /** Published values are rounded down to this, kN. Cells are stored in single precision, which tells 0.1 kN apart. */

@@ -30,6 +30,10 @@ export const lookupDetailsResponse = z.object({
       fixed: z.array(
         z.object({ name: z.string(), label: z.string(), unit: z.string(), value: parameterValueSchema }),
       ),
+      /** Parameters that follow from others, and the expression that says how. */
+      derived: z.array(
+        z.object({ name: z.string(), label: z.string(), unit: z.string(), expression: z.string() }),
+      ),
     }),
   ),
 });

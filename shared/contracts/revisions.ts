@@ -195,6 +195,8 @@ export const sheetResponse = z.object({
       unit: z.string(),
       group: z.string(),
       value: z.unknown(),
+      /** A derived parameter: what its value follows from; null for others. */
+      expression: z.string().nullable(),
     }),
   ),
   outcome: z.discriminatedUnion('status', [

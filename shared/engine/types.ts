@@ -124,6 +124,8 @@ export interface FieldFault {
   readonly field: string;
   readonly value: unknown;
   readonly message: string;
+  /** In an expression: places of the first character at fault and after the last. */
+  readonly place?: { readonly start: number; readonly end: number };
 }
 
 /** A rule of validity that a detail breaks: never an error, always a reason with its numbers. */

@@ -14,8 +14,9 @@ type Rounding = (value: number) => number;
 /** Halves away from zero; what is a half but for noise is one, as it would be by hand. */
 const toNearest: Rounding = (value) => Math.sign(value) * Math.floor(Math.abs(value) + 0.5 + NOISE);
 
-/** Three steps of 0.1 are 0.3, not 0.30000000000000004; adding 0 makes -0 plain. */
-const tidy = (value: number): number => (Math.abs(value) < 1e6 ? Math.round(value * 1e9) / 1e9 : value) + 0;
+/** Free of floating-point noise: three steps of 0.1 are 0.3, not 0.30000000000000004; adding 0 makes -0 plain. */
+export const tidy = (value: number): number =>
+  (Math.abs(value) < 1e6 ? Math.round(value * 1e9) / 1e9 : value) + 0;
 
 /** Rounds to whole multiples of a step; noise costs no whole step: 70 × 1.1 rounds up to 77, not to 78. */
 function toStep(value: number, step: number, rounding: Rounding): number {

@@ -4,10 +4,13 @@ import type { BinaryOperator, Node, Place } from './types.ts';
 /** Why an expression has no value for one variant, and which characters say so. */
 export interface Failure extends Place {
   readonly reason: string;
+  /** The name that has no value, where that is the reason. */
+  readonly name?: string;
 }
 
 /** The values of the names, and where an evaluation failed. Used again and again: evaluating allocates nothing. */
 export interface Frame {
+  /** NaN where a name has no value. */
   readonly numbers: Float64Array;
   readonly words: string[];
   /** The first operation without a finite result; whoever evaluates sets it to null before. */
@@ -29,7 +32,11 @@ export function compile(node: Node, slots: Slots): Evaluate {
     }
     case 'name': {
       const slot = slotOf(node.name, slots);
-      return (frame) => frame.numbers[slot]!;
+      const without = { ...failureAt(node, `${node.name} has no value`), name: node.name };
+      return (frame) => {
+        const value = frame.numbers[slot]!;
+        return Number.isNaN(value) ? fail(frame, without) : value;
+      };
     }
     case 'minus': {
       const operand = compile(node.operand, slots);

@@ -10,5 +10,7 @@ export {
   type ExpressionResult,
 } from './expression.ts';
 export { functions, keywords, operators, type FunctionInfo } from './functions.ts';
+export { formulaReader } from './formulas.ts';
 export { orderOf } from './order.ts';
+export { scopeOf } from './scope.ts';
 export { EXPRESSION_LIMITS, type ExpressionFault, type NameInfo, type ValueType } from './types.ts';

@@ -14,8 +14,10 @@ import {
   variantValues,
   type SweepDefinition,
 } from '@shared/engine/sweep/index.ts';
+import { formulaReader } from '@shared/expressions/index.ts';
 
 const kind = findKind('gusset-plate')!;
+const engineCatalogue = toEngineCatalogue(catalogue);
 const limits = { variants: 1_000_000, cells: 20_000_000, angles: 721 };
 const definition: SweepDefinition = {
   kind: 'gusset-plate',
@@ -32,12 +34,12 @@ const definition: SweepDefinition = {
   factors: { gammaM0: 1, gammaM1: 1, gammaM2: 1.25 },
 };
 const gridOf = (given: SweepDefinition) => {
-  const result = expandGrid(given, kind, limits);
+  const result = expandGrid(given, kind, limits, formulaReader(engineCatalogue));
   if (!result.ok) throw new Error(JSON.stringify(result.faults));
   return result.grid;
 };
 const faultsOf = (given: SweepDefinition) => {
-  const result = expandGrid(given, kind, limits);
+  const result = expandGrid(given, kind, limits, formulaReader(engineCatalogue));
   return result.ok ? [] : result.faults.map(({ field, message }) => `${field}: ${message}`);
 };
 
@@ -108,8 +110,6 @@ describe('rounding', () => {
 });
 
 describe('a chunk', () => {
-  const engineCatalogue = toEngineCatalogue(catalogue);
-
   it('holds what the engine says of each cell, rounded down, or the rule that rejects it', () => {
     const grid = gridOf(definition);
     const chunk = sweepChunk(definition, kind, grid, engineCatalogue, 5, 7);

@@ -6,6 +6,7 @@ import type { TableDocument, TableSheet } from '../../documents/xlsx/types.ts';
 import type { SignedInPerson } from '../../http/route.ts';
 import {
   cautionsOf,
+  derivedParametersOf,
   fixedParametersOf,
   limitStatesOf,
   notesOf,
@@ -47,7 +48,7 @@ export async function documentOf(
     created: now,
     sheets: sheetsOf(app, swept, layout, request),
     limitStates: limitStatesOf(swept),
-    rules: ruleLegend(swept.kind).map(({ title }, index) => ({
+    rules: ruleLegend(swept.kind, swept.definition.rules).map(({ title }, index) => ({
       number: index + 1,
       title,
       clause: rules[index]?.clause ?? '',
@@ -107,6 +108,13 @@ function factsOf(swept: SweptRevision): TableDocument['facts'] {
       : []),
     ...fixedParametersOf(swept).map(
       ({ name, label, unit, value }) => [label, shownValue(swept, name, value), unit] as const,
+    ),
+    ...derivedParametersOf(swept).map(
+      ({ label, unit, expression }) => [`${label}, derived`, expression, unit] as const,
+    ),
+    ...(definition.rules ?? []).map(
+      ({ expression, message }, index) =>
+        [`Rule ${index + 1} of the family: ${message}`, expression, ''] as const,
     ),
   ];
 }

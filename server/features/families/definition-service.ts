@@ -2,7 +2,16 @@ import { createHash } from 'node:crypto';
 import type { Fault } from '@shared/contracts/common.ts';
 import { LIMITS, type Definition } from '@shared/contracts/definition.ts';
 import { findBasis, findKind, type DetailKind, type ParameterValue } from '@shared/engine/index.ts';
-import { expandGrid, valuesOf, type SweepDefinition, type SweepGrid } from '@shared/engine/sweep/index.ts';
+import {
+  expandGrid,
+  type FormulaReader,
+  hasExpressions,
+  valuesOf,
+  type SweepDefinition,
+  type SweepGrid,
+  type VariantFormulas,
+} from '@shared/engine/sweep/index.ts';
+import { formulaReader } from '@shared/expressions/index.ts';
 import { canonicalJson } from '../../canonical-json.ts';
 import { engineCatalogue } from '../../catalogue.ts';
 import { problem } from '../../http/problems.ts';
@@ -29,13 +38,13 @@ export function checkDefinition(definition: Definition): CheckedDefinition {
   if (!kind) return refuse([unknown('definition.kind', 'kind of detail', definition.kind)]);
   if (!findBasis(definition.basis))
     return refuse([unknown('definition.basis', 'design basis', definition.basis)]);
-  const sweep = definition as SweepDefinition;
-  const laidOut = expandGrid(sweep, kind, LIMITS);
+  const sweep = withoutEmptyRules(definition) as SweepDefinition;
+  const laidOut = expandGrid(sweep, kind, LIMITS, readFormulas);
   if (!laidOut.ok)
     return refuse(laidOut.faults.map((fault) => ({ ...fault, field: `definition.${fault.field}` })));
   const faults = faultsOfValues(sweep, kind);
   if (faults.length > 0) return refuse(faults);
-  const text = canonicalJson(definition);
+  const text = canonicalJson(sweep);
   return { definition: sweep, kind, grid: laidOut.grid, text, hash: sha256(text) };
 }
 
@@ -44,9 +53,27 @@ export function layOut(text: string): CheckedDefinition {
   const definition = JSON.parse(text) as SweepDefinition;
   const kind = findKind(definition.kind);
   if (!kind) throw new Error(`No kind "${definition.kind}" in this program`);
-  const laidOut = expandGrid(definition, kind, LIMITS);
+  const laidOut = expandGrid(definition, kind, LIMITS, readFormulas);
   if (!laidOut.ok) throw new Error(`A stored definition is at fault: ${laidOut.faults[0]?.message}`);
   return { definition, kind, grid: laidOut.grid, text, hash: sha256(text) };
+}
+
+/**
+ * What a stored definition's expressions say of its variants; null where it has none.
+ * @throws {Error} when this program cannot read them
+ */
+export function formulasOf(definition: SweepDefinition, kind: DetailKind): VariantFormulas | null {
+  if (!hasExpressions(definition)) return null;
+  const read = readFormulas(definition, kind);
+  if (!read.ok) throw new Error(`A stored expression is at fault: ${read.faults[0]?.message}`);
+  return read.formulas;
+}
+
+const readFormulas: FormulaReader = (definition, kind) => formulaReader(engineCatalogue())(definition, kind);
+
+/** No rules and an empty list of them are the same definition, and must have the same hash. */
+function withoutEmptyRules({ rules, ...rest }: Definition): Definition {
+  return rules?.length ? { ...rest, rules } : rest;
 }
 
 export const sha256 = (text: string | Buffer): string => createHash('sha256').update(text).digest('hex');

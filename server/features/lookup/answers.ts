@@ -1,8 +1,14 @@
 import type { LookupAnswer } from '@shared/contracts/lookup.ts';
 import { kilonewtons, toRadians, type PreparedDetail, type Sense } from '@shared/engine/index.ts';
-import { capacityCurve, roundDown, ruleLegend } from '@shared/engine/sweep/index.ts';
+import { capacityCurve, roundDown, ruleLegend, type VariantResult } from '@shared/engine/sweep/index.ts';
 import { problem } from '../../http/problems.ts';
-import { anglesOfKind, type Envelope, limitStatesOf, type SweptRevision } from '../results/service.ts';
+import {
+  anglesOfKind,
+  type Envelope,
+  limitStatesOf,
+  outcomeWithout,
+  type SweptRevision,
+} from '../results/service.ts';
 import { readLoad } from './load.ts';
 
 /** What is looked up of one variant. */
@@ -52,11 +58,11 @@ function capacityOutcome(
   return { status: 'capacity', capacity, unrounded, governing, ...readLoad(load, capacity) };
 }
 
-/** A variant whose fields contradict each other. */
-export function faultyAnswer(swept: SweptRevision, reason: string): Answer {
+/** A variant that cannot be prepared: its fields contradict each other, or a derived one has no value. */
+export function faultyAnswer(swept: SweptRevision, variant: Extract<VariantResult, { ok: false }>): Answer {
   const angles = anglesOfKind(swept, 1);
   const curve = { angles, capacity: angles.map(() => null), governing: angles.map(() => -1) };
-  return { outcome: { status: 'not-covered', reason }, curve };
+  return { outcome: outcomeWithout(variant), curve };
 }
 
 /**
@@ -74,7 +80,7 @@ export function storedAnswer(swept: SweptRevision, curve: Envelope, { angle, loa
   const code = curve.governing[place] ?? -1;
   const shown = { ...curve, governing: curve.governing.map((one) => Math.max(one, -1)) };
   if (capacity === null) {
-    const rule = ruleLegend(swept.kind)[-1 - code];
+    const rule = ruleLegend(swept.kind, swept.definition.rules)[-1 - code];
     const reason = `Not permitted when it was published: ${rule?.title ?? 'a rule unknown to this version'}.`;
     return { outcome: { status: 'not-covered', reason }, curve: shown };
   }

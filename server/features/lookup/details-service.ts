@@ -3,7 +3,7 @@ import type { lookupDetailsResponse } from '@shared/contracts/lookup.ts';
 import type { App } from '../../context.ts';
 import type { FamilyRow } from '../../database/models/family.ts';
 import type { RevisionRow } from '../../database/models/revision.ts';
-import { fixedParametersOf, nameParameter, withResults } from '../results/service.ts';
+import { derivedParametersOf, fixedParametersOf, nameParameter, withResults } from '../results/service.ts';
 
 type Details = z.input<typeof lookupDetailsResponse>['details'];
 
@@ -34,5 +34,11 @@ function presentDetail(row: RevisionRow, family: FamilyRow): Details[number] {
     angleMaximum: swept.kind.angleRange.maximum,
     choices: swept.axes.map(({ name, values }) => ({ ...nameParameter(swept, name), values: [...values] })),
     fixed: fixedParametersOf(swept).map(({ name, label, unit, value }) => ({ name, label, unit, value })),
+    derived: derivedParametersOf(swept).map(({ name, label, unit, expression }) => ({
+      name,
+      label,
+      unit,
+      expression,
+    })),
   };
 }

@@ -67,7 +67,7 @@ async function answerTo(app: App, swept: SweptRevision, ordinal: number, questio
   });
   if (!swept.current) return asStored();
   const prepared = prepareVariant(swept, ordinal);
-  if (!prepared.ok) return { ...faultyAnswer(swept, prepared.reason), notes: notesOf(swept) };
+  if (!prepared.ok) return { ...faultyAnswer(swept, prepared), notes: notesOf(swept) };
   const computed = computedAnswer(swept, prepared.detail, question);
   const place = placeOfAngle(swept, question.angle);
   const { outcome } = computed;

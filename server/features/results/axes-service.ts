@@ -24,7 +24,7 @@ export function limitStatesOf({ kind, definition }: SweptRevision): readonly Lim
 export async function rulesOf(app: App, swept: SweptRevision): Promise<LegendRule[]> {
   const counts = new Map(swept.summary.rejected.map(({ rule, cells }) => [rule, cells]));
   return Promise.all(
-    ruleLegend(swept.kind).map(async ({ id, title }, index) => {
+    ruleLegend(swept.kind, swept.definition.rules).map(async ({ id, title }, index) => {
       const cells = counts.get(id) ?? 0;
       const clause = cells > 0 ? await clauseOf(app, swept, id, RULE_CODE - index) : '';
       return { rule: id, title, clause, cells };
@@ -40,7 +40,8 @@ async function clauseOf(app: App, swept: SweptRevision, rule: string, code: numb
     { id: swept.row.id, code },
   );
   const prepared = found ? prepareVariant(swept, found.ordinal) : undefined;
-  if (!found || !prepared?.ok) return '';
+  if (!found || !prepared) return '';
+  if (!prepared.ok) return prepared.rejections[0]?.clause ?? '';
   const { angles, senses } = swept;
   const cell = Number(found.place) - 1;
   const angle = angles[cell % angles.length] ?? 0;

@@ -7,11 +7,13 @@ import type {
   Sense,
   SheetSection,
 } from '@shared/engine/index.ts';
-import { roundDown, variantValues } from '@shared/engine/sweep/index.ts';
+import { roundDown } from '@shared/engine/sweep/index.ts';
 import { CAUTIONS } from '@shared/wording/cautions.ts';
 import {
   engineNote,
+  expressionOf,
   existingVariant,
+  outcomeWithout,
   placeOfSense,
   prepareVariant,
   warningOf,
@@ -33,14 +35,13 @@ export function parametersOf(swept: SweptRevision, given: ParameterValues): Shee
   const values: ParameterValues = { ...defaults, ...given };
   return swept.kind.parameters
     .filter((spec) => applies(spec, values, swept))
-    .map(({ name, label, symbol, unit, group }) => ({
-      name,
-      label,
-      symbol,
-      unit,
-      group,
-      value: values[name],
-    }));
+    .map(({ name, label, symbol, unit, group }) => {
+      const expression = expressionOf(swept, name);
+      // The default stands for a parameter that was left out, never for one that could not be derived.
+      const without = expression !== null && given[name] === undefined;
+      const read = without ? { unit: '', value: 'no usable value' } : { unit, value: values[name] };
+      return { name, label, symbol, group, ...read, expression };
+    });
 }
 
 const noted = (text: string, clause: string): string => (clause ? `${text} (${clause})` : text);
@@ -95,7 +96,7 @@ export function viewSheet(
 ): Sheet {
   existingVariant(swept, ordinal);
   placeOfSense(swept, sense);
-  const { row, family, basis, axes, fixed, summary } = swept;
+  const { row, family, basis, summary } = swept;
   const prepared = prepareVariant(swept, ordinal);
   const theta = toRadians(angle);
   const recorded = prepared.ok ? prepared.detail.record(theta, sense) : [];
@@ -111,10 +112,10 @@ export function viewSheet(
     engineVersion: ENGINE_VERSION,
     angle,
     sense,
-    parameters: parametersOf(swept, variantValues({ axes, fixed }, ordinal)),
+    parameters: parametersOf(swept, prepared.values),
     outcome: prepared.ok
       ? outcomeOf(prepared.detail, theta, sense, summary.increment)
-      : { status: 'not-covered', reason: prepared.reason },
+      : outcomeWithout(prepared),
     sections: prepared.ok ? sectionsOf(prepared.detail, theta, sense, recorded) : [],
     notes: notesOf(swept, recorded),
     cautions: cautionsOf(swept),

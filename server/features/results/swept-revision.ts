@@ -1,13 +1,21 @@
 import type { RevisionState } from '@shared/contracts/common.ts';
 import { ENGINE_VERSION, findBasis, findKind } from '@shared/engine/index.ts';
-import type { BasisInfo, DetailKind, ParameterValue, PreparedDetail, Sense } from '@shared/engine/index.ts';
-import { variantValues, type SweepDefinition, type SweptAxis } from '@shared/engine/sweep/index.ts';
+import type { BasisInfo, DetailKind, ParameterValue, Rejection, Sense } from '@shared/engine/index.ts';
+import {
+  prepareVariant as prepare,
+  variantValues,
+  type SweepDefinition,
+  type SweptAxis,
+  type VariantFormulas,
+  type VariantResult,
+} from '@shared/engine/sweep/index.ts';
 import { engineCatalogue } from '../../catalogue.ts';
 import type { App } from '../../context.ts';
 import type { FamilyRow } from '../../database/models/family.ts';
 import type { ResultSummary, RevisionRow } from '../../database/models/revision.ts';
 import { problem } from '../../http/problems.ts';
 import type { SignedInPerson } from '../../http/route.ts';
+import { formulasOf } from '../families/definition-service.ts';
 import { definitionOf, visibleRevision } from '../revisions/service.ts';
 
 /** A revision with results, and everything its cells are read with. */
@@ -19,6 +27,8 @@ export interface SweptRevision {
   readonly basis: BasisInfo;
   readonly axes: readonly SweptAxis[];
   readonly fixed: Readonly<Record<string, ParameterValue>>;
+  /** What the definition's expressions say of a variant; null where it has none. */
+  readonly formulas: VariantFormulas | null;
   readonly angles: readonly number[];
   readonly senses: readonly Sense[];
   readonly summary: ResultSummary;
@@ -67,6 +77,7 @@ export function withResults(row: RevisionRow, family: FamilyRow): SweptRevision 
     basis,
     axes: summary.axes as readonly SweptAxis[],
     fixed: Object.fromEntries(fixed),
+    formulas: formulasOf(definition, kind),
     angles: summary.angles,
     senses: summary.senses as readonly Sense[],
     summary,
@@ -76,18 +87,30 @@ export function withResults(row: RevisionRow, family: FamilyRow): SweptRevision 
   };
 }
 
-/** A variant worked out anew from the frozen definition, or why its fields contradict each other. */
+/** What a derived parameter follows from; null for every other. */
+export function expressionOf({ definition }: SweptRevision, name: string): string | null {
+  const setting = Object.hasOwn(definition.parameters, name) ? definition.parameters[name] : undefined;
+  return setting?.mode === 'derived' ? setting.expression : null;
+}
+
+/** A variant worked out anew from the frozen definition, or why it cannot be. */
 export function prepareVariant(
-  { axes, fixed, kind, definition }: SweptRevision,
+  { axes, fixed, formulas, kind, definition }: SweptRevision,
   ordinal: number,
-): { ok: true; detail: PreparedDetail } | { ok: false; reason: string } {
-  const values = variantValues({ axes, fixed }, ordinal);
-  const prepared = kind.prepare(values, definition.basis, engineCatalogue(), definition.factors);
-  if (prepared.ok) return prepared;
-  return {
-    ok: false,
-    reason: prepared.faults.map(({ field, message }) => `${field}: ${message}`).join('; '),
-  };
+): VariantResult {
+  const given = variantValues({ axes, fixed }, ordinal);
+  return prepare(definition, kind, formulas, engineCatalogue(), given);
+}
+
+/** What stands in place of a capacity where a variant cannot be prepared at any angle. */
+export function outcomeWithout({
+  rejections,
+  faults,
+}: Extract<VariantResult, { ok: false }>):
+  { status: 'not-permitted'; rejections: Rejection[] } | { status: 'not-covered'; reason: string } {
+  if (faults.length === 0) return { status: 'not-permitted', rejections: [...rejections] };
+  const reason = faults.map(({ field, message }) => `${field}: ${message}`).join('; ');
+  return { status: 'not-covered', reason };
 }
 
 /**

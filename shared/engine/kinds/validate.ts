@@ -152,7 +152,8 @@ function byName(type: ParameterType, name: string, catalogue: EngineCatalogue): 
   }
 }
 
-function catalogueNames({ type, shapes }: ParameterSpec, catalogue: EngineCatalogue): string[] {
+/** The names that a parameter may have in the catalogue; none where it is no catalogue choice. */
+export function catalogueNames({ type, shapes }: ParameterSpec, catalogue: EngineCatalogue): string[] {
   switch (type) {
     case 'steel':
       return catalogue.steels.map(({ name }) => name);

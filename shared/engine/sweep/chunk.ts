@@ -7,23 +7,11 @@ import {
   type PreparedDetail,
   type Sense,
 } from '../types.ts';
-import { variantValues } from './grid.ts';
+import { hasExpressions, variantValues } from './grid.ts';
 import { roundDown } from './rounding.ts';
+import { RULE_CODE, ruleLegend } from './rule-legend.ts';
 import type { SweepDefinition, SweepGrid } from './types.ts';
-
-/** Packed governing codes: an index of a limit state, or this less the index of a rule. */
-export const RULE_CODE = 255;
-
-/** Rules that are not a kind's own: the load angle is not covered, or a field of this one variant is at fault. */
-const GENERAL_RULES = [
-  { id: 'not-covered', title: 'Load angle not covered by the kind' },
-  { id: 'field-fault', title: 'Parameters that contradict each other' },
-] as const;
-
-/** The legend of rejected cells, fixed for a kind so that codes do not depend on what is swept. */
-export function ruleLegend(kind: DetailKind): readonly { readonly id: string; readonly title: string }[] {
-  return [...kind.rules, ...GENERAL_RULES];
-}
+import { prepareVariant } from './variant.ts';
 
 /** The packed results of some whole variants; a variant's cells lie together, senses outside, angles inside. */
 export interface SweptChunk {
@@ -49,22 +37,26 @@ export function sweepChunk(
   firstOrdinal: number,
   variantCount: number,
 ): SweptChunk {
-  const chunk = emptyChunk(kind, grid, firstOrdinal, variantCount);
-  const sweeper = new VariantSweeper(kind, grid, definition.increment, chunk);
+  // Without its expressions a derived parameter would silently have its default.
+  if (hasExpressions(definition) !== (grid.formulas !== null))
+    throw new Error('The grid was laid out without the expressions of the definition');
+  const legend = ruleLegend(kind, definition.rules);
+  const chunk = emptyChunk(grid, firstOrdinal, variantCount, legend.length);
+  const sweeper = new VariantSweeper(kind, grid, definition.increment, chunk, legend);
   for (let index = 0; index < variantCount; index++) {
-    const values = variantValues(grid, firstOrdinal + index);
-    const prepared = kind.prepare(values, definition.basis, catalogue, definition.factors);
-    if (prepared.ok) sweeper.sweep(index, prepared.detail);
-    else sweeper.reject(index);
+    const given = variantValues(grid, firstOrdinal + index);
+    const variant = prepareVariant(definition, kind, grid.formulas, catalogue, given);
+    if (variant.ok) sweeper.sweep(index, variant.detail);
+    else sweeper.reject(index, variant.rule);
   }
   return chunk;
 }
 
 function emptyChunk(
-  kind: DetailKind,
   grid: SweepGrid,
   firstOrdinal: number,
   variantCount: number,
+  ruleCount: number,
 ): SweptChunk {
   const cells = variantCount * grid.senses.length * grid.angles.length;
   return {
@@ -75,7 +67,7 @@ function emptyChunk(
     mass: new Float64Array(variantCount).fill(NaN),
     boltCount: new Uint32Array(variantCount),
     weldVolume: new Float64Array(variantCount).fill(NaN),
-    rejected: new Uint32Array(ruleLegend(kind).length),
+    rejected: new Uint32Array(ruleCount),
   };
 }
 
@@ -90,10 +82,11 @@ class VariantSweeper {
     private readonly grid: SweepGrid,
     private readonly increment: number,
     private readonly chunk: SweptChunk,
+    legend: readonly { readonly id: string }[],
   ) {
     this.out = new Float64Array(kind.limitStates.length);
     this.angles = Float64Array.from(grid.angles, toRadians);
-    this.rules = new Map(ruleLegend(kind).map(({ id }, index) => [id, index]));
+    this.rules = new Map(legend.map(({ id }, index) => [id, index]));
   }
 
   sweep(index: number, detail: PreparedDetail): void {
@@ -107,10 +100,9 @@ class VariantSweeper {
     }
   }
 
-  reject(index: number): void {
+  reject(index: number, rule: string): void {
     const perVariant = this.grid.senses.length * this.angles.length;
-    for (let cell = index * perVariant; cell < (index + 1) * perVariant; cell++)
-      this.mark(cell, 'field-fault');
+    for (let cell = index * perVariant; cell < (index + 1) * perVariant; cell++) this.mark(cell, rule);
   }
 
   private fill(cell: number, detail: PreparedDetail, theta: number, sense: Sense): void {

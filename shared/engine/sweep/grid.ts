@@ -1,14 +1,30 @@
-import type { DetailKind, FieldFault, ParameterValue, ParameterValues } from '../types.ts';
+import type { DetailKind, FieldFault, ParameterSpec, ParameterValue, ParameterValues } from '../types.ts';
 import { countOfRange, valuesOfRange } from './range.ts';
-import type { AngleSetting, GridResult, Setting, SweepDefinition, SweepLimits, SweptAxis } from './types.ts';
+import type {
+  AngleSetting,
+  FormulaReader,
+  GridResult,
+  Setting,
+  SweepDefinition,
+  SweepLimits,
+  SweptAxis,
+  VariantFormulas,
+} from './types.ts';
 
 /**
  * Lays a definition out as a grid, or says every fault with its path (`parameters.pitch.step`). A grid that is
  * too large is counted and refused, never expanded.
+ * @param readFormulas reads the expressions of a definition that has any
  */
-export function expandGrid(definition: SweepDefinition, kind: DetailKind, limits: SweepLimits): GridResult {
+export function expandGrid(
+  definition: SweepDefinition,
+  kind: DetailKind,
+  limits: SweepLimits,
+  readFormulas: FormulaReader,
+): GridResult {
   const faults: FieldFault[] = [];
   faultsOfSettings(definition, kind, faults);
+  const formulas = formulasOf(definition, kind, readFormulas, faults);
   faultsOfAngles(definition, kind, limits, faults);
   if (faults.length === 0) faultsOfSize(definition, limits, faults);
   if (faults.length > 0) return { ok: false, faults };
@@ -16,17 +32,35 @@ export function expandGrid(definition: SweepDefinition, kind: DetailKind, limits
   const fixed: Record<string, ParameterValue> = {};
   for (const { name } of kind.parameters) {
     const setting = definition.parameters[name];
-    if (setting === undefined) continue;
+    if (setting === undefined || setting.mode === 'derived') continue;
     if (setting.mode === 'fixed') fixed[name] = setting.value;
     else axes.push({ name, values: valuesOf(setting) });
   }
   const { angles, senses } = { angles: anglesOf(definition.angles), senses: definition.senses };
   const variantCount = axes.reduce((product, { values }) => product * values.length, 1);
   const cellCount = variantCount * angles.length * senses.length;
-  return { ok: true, grid: { axes, fixed, variantCount, cellCount, angles, senses } };
+  return { ok: true, grid: { axes, fixed, variantCount, cellCount, angles, senses, formulas } };
 }
 
-/** The parameter values of one variant, by its place in the grid. */
+function formulasOf(
+  definition: SweepDefinition,
+  kind: DetailKind,
+  readFormulas: FormulaReader,
+  faults: FieldFault[],
+): VariantFormulas | null {
+  if (!hasExpressions(definition)) return null;
+  const read = readFormulas(definition, kind);
+  if (read.ok) return read.formulas;
+  faults.push(...read.faults);
+  return null;
+}
+
+/** Whether a definition derives a parameter or has a rule. */
+export function hasExpressions({ parameters, rules = [] }: SweepDefinition): boolean {
+  return rules.length > 0 || Object.values(parameters).some(({ mode }) => mode === 'derived');
+}
+
+/** The fixed and swept values of one variant, by its place in the grid; derived ones are not among them. */
 export function variantValues(
   grid: { readonly axes: readonly SweptAxis[]; readonly fixed: ParameterValues },
   ordinal: number,
@@ -45,8 +79,9 @@ export function ordinalOf(axes: readonly SweptAxis[], indices: readonly number[]
   return axes.reduce((ordinal, { values }, axis) => ordinal * values.length + (indices[axis] ?? 0), 0);
 }
 
-/** Every value that a setting stands for. */
+/** Every value that a setting stands for; none where it is derived. */
 export function valuesOf(setting: Setting): readonly ParameterValue[] {
+  if (setting.mode === 'derived') return [];
   if (setting.mode === 'fixed') return [setting.value];
   return setting.mode === 'list' ? setting.values : valuesOfRange(setting.from, setting.to, setting.step);
 }
@@ -57,7 +92,7 @@ export function anglesOf(setting: AngleSetting): readonly number[] {
 }
 
 function countOf(setting: Setting | AngleSetting): number {
-  if (setting.mode === 'fixed') return 1;
+  if (setting.mode === 'fixed' || setting.mode === 'derived') return 1;
   if (setting.mode === 'list') return setting.values.length;
   return countOfRange(setting.from, setting.to, setting.step);
 }
@@ -69,17 +104,22 @@ function faultsOfSettings(definition: SweepDefinition, kind: DetailKind, faults:
     const spec = known.get(name);
     if (spec === undefined) {
       faults.push({ field, value: name, message: `${kind.title} has no parameter named "${name}".` });
-    } else if (setting.mode === 'range') {
-      if (!['length', 'number', 'count'].includes(spec.type)) {
-        const message = `${spec.label} is chosen from a list; from–to–step is for numbers.`;
+    } else if (setting.mode === 'range' || setting.mode === 'derived') {
+      if (!isNumeric(spec)) {
+        const what = setting.mode === 'range' ? 'from–to–step is' : 'expressions are';
+        const message = `${spec.label} is chosen from a list; ${what} for numbers.`;
         faults.push({ field, value: setting.mode, message });
       }
-      faultsOfRange(field, setting, faults);
+      if (setting.mode === 'range') faultsOfRange(field, setting, faults);
     } else if (setting.mode === 'list') {
       faultsOfList(field, setting.values, faults);
     }
   }
 }
+
+/** Whether a parameter is a number, and so can count from–to–step or be derived. */
+export const isNumeric = ({ type }: Pick<ParameterSpec, 'type'>): boolean =>
+  type === 'length' || type === 'number' || type === 'count';
 
 function faultsOfRange(
   field: string,

@@ -1,10 +1,21 @@
-import type { BasisId, FieldFault, KindId, ParameterValue, PartialFactors, Sense } from '../types.ts';
+import type {
+  BasisId,
+  DetailKind,
+  FieldFault,
+  KindId,
+  ParameterValue,
+  ParameterValues,
+  PartialFactors,
+  Rejection,
+  Sense,
+} from '../types.ts';
 
-/** How one parameter varies. `range` counts from `from` to `to` inclusive. */
+/** How one parameter varies. `range` counts from `from` to `to` inclusive; `derived` follows from others. */
 export type Setting =
   | { readonly mode: 'fixed'; readonly value: ParameterValue }
   | { readonly mode: 'list'; readonly values: readonly ParameterValue[] }
-  | { readonly mode: 'range'; readonly from: number; readonly to: number; readonly step: number };
+  | { readonly mode: 'range'; readonly from: number; readonly to: number; readonly step: number }
+  | { readonly mode: 'derived'; readonly expression: string };
 
 /** Load angles in degrees. */
 export type AngleSetting =
@@ -16,6 +27,8 @@ export interface SweepDefinition {
   readonly kind: KindId;
   readonly basis: BasisId;
   readonly parameters: Readonly<Record<string, Setting>>;
+  /** Rules that reject a variant for which the expression does not hold. */
+  readonly rules?: readonly { readonly expression: string; readonly message: string }[];
   readonly angles: AngleSetting;
   readonly senses: readonly Sense[];
   /** kN. */
@@ -36,6 +49,27 @@ export interface SweptAxis {
   readonly values: readonly ParameterValue[];
 }
 
+/** What a definition's expressions say of a variant; absent where it has none. */
+export interface VariantFormulas {
+  /** Adds the derived values to those that are fixed or swept, and asks the family's rules. */
+  complete(given: ParameterValues): CompletedValues;
+}
+export interface CompletedValues {
+  /** Whether every derived parameter has a value. */
+  readonly complete: boolean;
+  readonly values: ParameterValues;
+  /** The derived parameter that has no usable value, or the family's rules that do not hold. */
+  readonly rejections: readonly Rejection[];
+}
+
+/** Reads the expressions of a definition. The engine is given one: it knows no expressions itself. */
+export type FormulaReader = (
+  definition: SweepDefinition,
+  kind: DetailKind,
+) =>
+  | { readonly ok: true; readonly formulas: VariantFormulas }
+  | { readonly ok: false; readonly faults: readonly FieldFault[] };
+
 /** A definition laid out: the last axis varies fastest. */
 export interface SweepGrid {
   readonly axes: readonly SweptAxis[];
@@ -45,6 +79,7 @@ export interface SweepGrid {
   /** Degrees. */
   readonly angles: readonly number[];
   readonly senses: readonly Sense[];
+  readonly formulas: VariantFormulas | null;
 }
 
 export type GridResult =

@@ -41,7 +41,7 @@ function summaryOf({ definition, kind, grid }: CheckedDefinition, variants: Pack
     increment: definition.increment,
     lowest: Math.min(...kilonewtons),
     highest: Math.max(...kilonewtons),
-    rejected: ruleLegend(kind)
+    rejected: ruleLegend(kind, definition.rules)
       .map(({ id }, index) => ({
         rule: id,
         cells: codes.filter((code) => code === RULE_CODE - index).length,
