@@ -62,6 +62,7 @@ class Checker {
   private nameType(name: string, place: Place): ValueType | undefined {
     const info = this.scope.get(name);
     if (info !== undefined) {
+      if (info.unused !== undefined) this.fault(place, info.unused);
       this.names.add(name);
       return info.type;
     }

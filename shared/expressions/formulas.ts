@@ -17,7 +17,7 @@ import { scopeOf } from './scope.ts';
 /** The reader of a definition's expressions that the engine asks for: every fault with its field and place. */
 export function formulaReader(catalogue: EngineCatalogue): FormulaReader {
   return (definition, kind) => {
-    const scope = scopeOf(kind, catalogue);
+    const scope = scopeOf(kind, catalogue, definition);
     const reader = new DefinitionReader(scope, slotsOf(scope));
     const derived = reader.derived(definition, kind);
     const rules = reader.rules(definition);

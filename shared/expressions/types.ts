@@ -39,6 +39,8 @@ export interface NameInfo {
   readonly unit: string;
   /** A word: those it can be; absent where any is possible. */
   readonly words?: readonly string[];
+  /** Why it must not be used, where the family's other choices leave it without effect. */
+  readonly unused?: string;
 }
 
 /** The most that an expression may be. */

@@ -64,12 +64,12 @@ describe('saving a definition', () => {
   test('names a circle in order', async () => {
     const [fault] = await faultsOf({
       parameters: {
-        pitch: { mode: 'derived', expression: 'gauge + 10' },
-        gauge: { mode: 'derived', expression: 'weld_length / 4' },
+        pitch: { mode: 'derived', expression: 'first_row + 10' },
+        first_row: { mode: 'derived', expression: 'weld_length / 4' },
         weld_length: { mode: 'derived', expression: '5 * pitch' },
       },
     });
-    expect(fault!.field).toMatch(/^definition\.parameters\.(pitch|gauge|weld_length)\.expression$/);
+    expect(fault!.field).toMatch(/^definition\.parameters\.(pitch|first_row|weld_length)\.expression$/);
     expect(fault!.message).toMatch(/circle: \w+ → \w+ → \w+ → \w+\./);
   });
 

@@ -23,6 +23,7 @@ const detail: LookUpDetail = {
   angleMaximum: 80,
   choices: [{ name: 'bolt_size', label: 'Bolt size', symbol: 'd', unit: '', values: ['M20', 'M24'] }],
   fixed: [],
+  derived: [],
 };
 
 describe('the question in the address', () => {

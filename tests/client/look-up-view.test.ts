@@ -25,6 +25,7 @@ const details = [
     angleMaximum: 80,
     choices: [],
     fixed: [],
+    derived: [],
   },
 ];
 const governing = { id: 'bolt-shear', code: 'BS', title: 'Bolt shear', part: 'bolt', clause: '13.12.1.1' };

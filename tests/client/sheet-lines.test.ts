@@ -36,18 +36,26 @@ const sections = [
   { id: 'gusset-buckling', title: 'Buckling', code: 'GC', capacity: null, lines: [] },
 ];
 const outcome = { status: 'capacity' as const, capacity: 250, rounded: 250, governing: 'bolt-shear' };
-const parameter = (name: string, label: string, group: string, value: unknown) => ({
+const parameter = (
+  name: string,
+  label: string,
+  group: string,
+  value: unknown,
+  expression: string | null = null,
+) => ({
   name,
   label,
   symbol: '',
   unit: 'mm',
   group,
   value,
+  expression,
 });
 const parameters = [
   parameter('bolt_size', 'Bolt size', 'bolts', 'M20'),
   parameter('plate_thickness', 'Plate thickness', 'plate', 12),
   parameter('outline', 'Outline', 'plate', 'tapered'),
+  parameter('pitch', 'Pitch', 'bolts', 50, '2.5 * bolt_d'),
 ];
 
 describe('the lines of a calculation sheet', () => {
@@ -66,6 +74,10 @@ describe('the lines of a calculation sheet', () => {
     const groups = givenGroups(parameters, 'gusset-plate');
     expect(groups.map(({ title }) => title)).toEqual(['Plate', 'Bolts']);
     expect(groups[0]?.lines.map(({ value }) => value)).toEqual(['12', 'Tapered']);
+    expect(groups[1]?.lines.map(({ value, expression }) => [value, expression])).toEqual([
+      ['M20', null],
+      ['50', '2.5 * bolt_d'],
+    ]);
   });
 
   it('leave out of the working what only repeats a given value', () => {

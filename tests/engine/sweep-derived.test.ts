@@ -242,9 +242,24 @@ describe('Faults of expressions in a definition', () => {
     const circle = { plate_thickness: derived('plate_fy / 30'), pitch: derived('5 * plate_thickness') };
     const [fault] = faultsOf(define(circle));
     expect(fault!.message).toContain('plate_thickness → plate_fy → plate_thickness.');
-    expect(faultsOf(define({ pitch: derived('gauge'), gauge: derived('pitch') }))[0]!.message).toContain(
-      'pitch → gauge → pitch.',
-    );
+    expect(
+      faultsOf(define({ pitch: derived('first_row'), first_row: derived('pitch') }))[0]!.message,
+    ).toContain('pitch → first_row → pitch.');
+  });
+
+  it('refuse a parameter that has no effect in the detail, with the reason', () => {
+    const messages = (definition: SweepDefinition) => faultsOf(definition).map(({ message }) => message);
+    const projection = derived('projection / 5');
+    expect(messages(define({ gusset_end_distance: projection }))).toEqual([
+      'At character 1, projection: Projection from the face has no effect unless Outline is rectangular.',
+    ]);
+    const outlines = { outline: list('tapered', 'rectangular'), gusset_end_distance: projection };
+    expect(messages(define(outlines))).toEqual([]);
+    // Hole making counts in SANS and CSA only.
+    const rule = { expression: 'hole_making = "drilled"', message: 'Drilled holes only' };
+    expect(messages(define({}, [rule]))).toEqual([
+      'At character 1, hole_making: Holes has no effect in EN 1993-1-8.',
+    ]);
   });
 
   it('never let a derived parameter fall back on its default', () => {

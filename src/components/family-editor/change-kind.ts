@@ -10,7 +10,7 @@ export const isOfOtherKind = (draft: FamilyDraft, kind: DetailKind): boolean =>
  * new kind has such a parameter.
  */
 export function ofKind(draft: FamilyDraft, from: DetailKind, to: DetailKind): FamilyDraft {
-  const { code, title, basis, increment, factors } = draft;
+  const { code, title, basis, increment, factors, rules } = draft;
   const usual = { gammaM0: 1, gammaM1: 1, gammaM2: 1.25 };
   const fresh = newDraft(to, basis, { increment, factors: usual });
   const untouched = newDraft(from, basis, { increment, factors: usual });
@@ -21,5 +21,5 @@ export function ofKind(draft: FamilyDraft, from: DetailKind, to: DetailKind): Fa
     if (JSON.stringify(own) !== JSON.stringify(untouched.parameters[name]))
       fresh.parameters[name] = structuredClone(own);
   }
-  return { ...fresh, code, title, factors: { ...factors } };
+  return { ...fresh, code, title, factors: { ...factors }, rules: structuredClone(rules) };
 }

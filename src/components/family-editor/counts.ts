@@ -3,7 +3,7 @@ import { countOfRange } from '@shared/engine/sweep/index.ts';
 import { count } from '../../composables/format.ts';
 
 const many = (grid: AngleGrid | ParameterSetting): number => {
-  if (grid.mode === 'fixed') return 1;
+  if (grid.mode === 'fixed' || grid.mode === 'derived') return 1;
   return grid.mode === 'list' ? grid.values.length : countOfRange(grid.from, grid.to, grid.step);
 };
 

@@ -16,6 +16,7 @@ const rangeWords = ({ from, to, step }: RangeText) => `${from} to ${to} by ${ste
 function settingWords(draft: ParameterDraft | undefined): string {
   if (!draft) return '';
   if (draft.mode === 'fixed') return titleOf(draft.fixed);
+  if (draft.mode === 'derived') return `= ${draft.expression}`;
   return draft.mode === 'list' ? draft.list.map(titleOf).join(', ') : rangeWords(draft.range);
 }
 
@@ -28,6 +29,11 @@ const FIELDS: readonly { field: keyof FamilyDraft; label: string; words: (draft:
       field: 'angles',
       label: 'Load angles',
       words: ({ angles }) => (angles.mode === 'list' ? angles.list.join(', ') : rangeWords(angles.range)),
+    },
+    {
+      field: 'rules',
+      label: 'Rules of this family',
+      words: ({ rules }) => rules.map(({ expression, message }) => `${expression}: ${message}`).join('; '),
     },
     { field: 'factors', label: 'Partial factors', words: ({ factors }) => Object.values(factors).join(', ') },
   ];

@@ -1,4 +1,5 @@
 import type { AngleGrid, Definition, ParameterSetting } from '@shared/contracts/definition.ts';
+import { isNumeric } from '@shared/engine/sweep/index.ts';
 import type {
   DetailKind,
   ParameterSpec,
@@ -23,6 +24,12 @@ export interface ParameterDraft {
   fixed: ParameterValue;
   list: ParameterValue[];
   range: RangeText;
+  expression: string;
+}
+
+export interface RuleDraft {
+  expression: string;
+  message: string;
 }
 
 export interface AnglesDraft {
@@ -37,14 +44,12 @@ export interface FamilyDraft {
   kind: string;
   basis: string;
   parameters: Record<string, ParameterDraft>;
+  rules: RuleDraft[];
   angles: AnglesDraft;
   senses: Sense[];
   increment: number;
   factors: Record<keyof PartialFactors, string>;
 }
-
-const NUMERIC = new Set<ParameterSpec['type']>(['length', 'number', 'count']);
-export const isNumeric = (spec: ParameterSpec): boolean => NUMERIC.has(spec.type);
 
 const asText = (spec: ParameterSpec, value: ParameterValue): ParameterValue =>
   isNumeric(spec) && typeof value === 'number' ? String(value) : value;
@@ -60,10 +65,12 @@ function parameterDraft(spec: ParameterSpec, setting?: ParameterSetting): Parame
     fixed: asText(spec, spec.default),
     list: [],
     range: rangeText(),
+    expression: '',
   };
   if (setting?.mode === 'fixed') draft.fixed = asText(spec, setting.value);
   if (setting?.mode === 'list') draft.list = setting.values.map((value) => asText(spec, value));
   if (setting?.mode === 'range') draft.range = rangeText(setting);
+  if (setting?.mode === 'derived') draft.expression = setting.expression;
   return draft;
 }
 
@@ -88,6 +95,7 @@ export function draftOf(
     parameters: Object.fromEntries(
       kind.parameters.map((spec) => [spec.name, parameterDraft(spec, definition.parameters[spec.name])]),
     ),
+    rules: (definition.rules ?? []).map(({ expression, message }) => ({ expression, message })),
     angles: anglesDraft(definition.angles),
     senses: [...definition.senses],
     increment: definition.increment,

@@ -1,6 +1,6 @@
 import type { ParameterSetting } from '@shared/contracts/definition.ts';
 import { kilonewtons, toRadians } from '@shared/engine/index.ts';
-import { valuesOf } from '@shared/engine/sweep/index.ts';
+import { prepareVariant, valuesOf, type VariantFormulas } from '@shared/engine/sweep/index.ts';
 import type {
   BasisId,
   CellOutcome,
@@ -11,6 +11,7 @@ import type {
   ParameterValues,
   PartialFactors,
   PreparedDetail,
+  Rejection,
   Sense,
 } from '@shared/engine/types.ts';
 import type { CapacityCurve } from '../load-dial/types.ts';
@@ -19,10 +20,18 @@ import type { CapacityCurve } from '../load-dial/types.ts';
 export type Sample = Readonly<Record<string, number>>;
 
 export type Preview =
-  | { readonly ok: false; readonly faults: readonly FieldFault[] }
+  | {
+      readonly ok: false;
+      readonly faults: readonly FieldFault[];
+      /** The derived parameter that has no usable value. */
+      readonly rejections: readonly Rejection[];
+      readonly values: ParameterValues;
+    }
   | {
       readonly ok: true;
       readonly detail: PreparedDetail;
+      /** The fixed, the sampled and the derived values. */
+      readonly values: ParameterValues;
       readonly limitStates: readonly LimitStateInfo[];
       readonly curve: CapacityCurve;
     };
@@ -31,19 +40,21 @@ export type Preview =
 export function sweptOf(kind: DetailKind, settings: Readonly<Record<string, ParameterSetting>>) {
   return kind.parameters.flatMap((spec) => {
     const setting = settings[spec.name];
-    return setting && setting.mode !== 'fixed' ? [{ spec, values: valuesOf(setting) }] : [];
+    const swept = setting?.mode === 'list' || setting?.mode === 'range';
+    return swept ? [{ spec, values: valuesOf(setting) }] : [];
   });
 }
 
-/** One variant: the fixed values, and of each swept parameter the sampled one (the first, when out of reach). */
+/** One variant without what is derived: the fixed values, and of each swept parameter the sampled one (the first, when out of reach). */
 export function sampleValues(
   settings: Readonly<Record<string, ParameterSetting>>,
   sample: Sample,
 ): ParameterValues {
   return Object.fromEntries(
-    Object.entries(settings).map(([name, setting]) => {
+    Object.entries(settings).flatMap(([name, setting]) => {
       const values = valuesOf(setting);
-      return [name, values[sample[name] ?? 0] ?? values[0] ?? ''];
+      const value = values[sample[name] ?? 0] ?? values[0];
+      return value === undefined ? [] : [[name, value]];
     }),
   );
 }
@@ -61,19 +72,26 @@ function curveOf(detail: PreparedDetail, kind: DetailKind, sense: Sense): Capaci
   return { angles, capacity, governing };
 }
 
+export interface PreviewInputs {
+  readonly kind: DetailKind;
+  readonly basis: string;
+  readonly catalogue: EngineCatalogue;
+  readonly factors: PartialFactors;
+  readonly formulas: VariantFormulas | null;
+}
+
 /** Prepares the sample by the engine and runs it round the angles. */
 export function previewOf(
-  kind: DetailKind,
-  basis: string,
-  catalogue: EngineCatalogue,
-  factors: PartialFactors,
-  values: ParameterValues,
+  { kind, basis, catalogue, factors, formulas }: PreviewInputs,
+  given: ParameterValues,
   sense: Sense,
 ): Preview {
-  const prepared = kind.prepare(values, basis as BasisId, catalogue, factors);
-  if (!prepared.ok) return prepared;
-  const { detail } = prepared;
-  return { ok: true, detail, limitStates: detail.limitStates, curve: curveOf(detail, kind, sense) };
+  const definition = { basis: basis as BasisId, factors };
+  const variant = prepareVariant(definition, kind, formulas, catalogue, given);
+  if (!variant.ok) return variant;
+  const { detail, values } = variant;
+  const curve = curveOf(detail, kind, sense);
+  return { ok: true, detail, values, limitStates: detail.limitStates, curve };
 }
 
 /** The outcome at one angle, degrees. */

@@ -5,8 +5,10 @@ import {
   type ParameterSetting,
 } from '@shared/contracts/definition.ts';
 import { findBasis } from '@shared/engine/index.ts';
-import type { DetailKind, ParameterSpec, ParameterValue } from '@shared/engine/types.ts';
-import { isNumeric, type FamilyDraft, type ParameterDraft } from './draft.ts';
+import type { DetailKind, EngineCatalogue, ParameterSpec, ParameterValue } from '@shared/engine/types.ts';
+import { isNumeric, type VariantFormulas } from '@shared/engine/sweep/index.ts';
+import type { FamilyDraft, ParameterDraft } from './draft.ts';
+import { readExpressions, readRules } from './read-expressions.ts';
 import { readList, readNumber, readRange, type FieldFault, type NumberRule } from './read-numbers.ts';
 
 export type { FieldFault } from './read-numbers.ts';
@@ -16,6 +18,7 @@ const possible = (draft: ParameterDraft | undefined): string[] => {
   if (!draft) return [];
   if (draft.mode === 'list') return draft.list.map(String);
   if (draft.mode === 'fixed') return [String(draft.fixed)];
+  if (draft.mode === 'derived') return [];
   const [from, to] = [Number(draft.range.from), Number(draft.range.to)];
   return from <= to && to - from < 100
     ? Array.from({ length: to - from + 1 }, (_, at) => String(from + at))
@@ -26,7 +29,10 @@ const possible = (draft: ParameterDraft | undefined): string[] => {
 export function isUsed(spec: ParameterSpec, draft: Pick<FamilyDraft, 'basis' | 'parameters'>): boolean {
   if (spec.bases && !spec.bases.some((id) => id === draft.basis)) return false;
   const { when } = spec;
-  return !when || possible(draft.parameters[when.parameter]).some((value) => when.is.includes(value));
+  const condition = when && draft.parameters[when.parameter];
+  // What a derived one comes to is known variant by variant only.
+  if (!when || condition?.mode === 'derived') return true;
+  return possible(condition).some((value) => when.is.includes(value));
 }
 
 const ruleOf = (spec: ParameterSpec): NumberRule => ({
@@ -51,8 +57,20 @@ function readNumeric(
     const values = readList(rule, draft.list.map(String), spec.name, LIMITS.values, faults);
     return values && { mode: 'list', values };
   }
+  if (draft.mode === 'derived') return readDerived(spec, draft, faults);
   const range = readRange(rule, draft.range, spec.name, LIMITS.values, faults);
   return range && { mode: 'range', ...range };
+}
+
+function readDerived(
+  { name, label }: ParameterSpec,
+  { expression }: ParameterDraft,
+  faults: FieldFault[],
+): ParameterSetting | null {
+  const text = expression.trim() === '' ? '' : expression;
+  if (text !== '') return { mode: 'derived', expression: text };
+  faults.push({ field: `${name}.expression`, message: `${label} needs an expression, e.g. 2 * bolt_d.` });
+  return null;
 }
 
 const copy = (value: ParameterValue) => (typeof value === 'object' ? { ...value } : value);
@@ -108,11 +126,20 @@ export interface ReadDraft {
   /** Those that could be read; the preview and the count use them. */
   readonly settings: Readonly<Record<string, ParameterSetting>>;
   readonly angles: AngleGrid | null;
+  /** What the expressions say of a variant; null where there are none, or while one is faulty. */
+  readonly formulas: VariantFormulas | null;
   readonly faults: readonly FieldFault[];
 }
 
-/** Reads the whole form; parameters that the detail does not use are left out. */
-export function readDraft(draft: FamilyDraft, kind: DetailKind): ReadDraft {
+/**
+ * Reads the whole form; parameters that the detail does not use are left out.
+ * @param catalogue null while it is not loaded: until then expressions are not read
+ */
+export function readDraft(
+  draft: FamilyDraft,
+  kind: DetailKind,
+  catalogue: EngineCatalogue | null = null,
+): ReadDraft {
   const faults: FieldFault[] = [];
   const settings: Record<string, ParameterSetting> = {};
   for (const spec of kind.parameters) {
@@ -126,6 +153,8 @@ export function readDraft(draft: FamilyDraft, kind: DetailKind): ReadDraft {
   if (draft.senses.length === 0)
     faults.push({ field: 'senses', message: 'Choose tension, compression or both.' });
   const { basis, increment, senses } = draft;
+  const rules = readRules(draft.rules, faults);
+  const formulas = readExpressions({ kind, basis, settings, rules, catalogue }, faults);
   const definition =
     faults.length || !angles || !factors
       ? null
@@ -134,10 +163,11 @@ export function readDraft(draft: FamilyDraft, kind: DetailKind): ReadDraft {
           kind: kind.id,
           basis,
           parameters: settings,
+          ...(rules.length > 0 ? { rules } : {}),
           angles,
           senses: [...senses],
           increment,
           factors,
         };
-  return { definition, settings, angles, faults };
+  return { definition, settings, angles, formulas, faults };
 }

@@ -15,6 +15,8 @@ export interface NumberRule {
 export interface FieldFault {
   readonly field: string;
   readonly message: string;
+  /** In an expression: places of the first character at fault and after the last. */
+  readonly place?: { readonly start: number; readonly end: number };
 }
 
 const quoted = (text: string) => (text.trim() === '' ? 'nothing' : `“${text.slice(0, 40)}”`);

@@ -17,7 +17,7 @@ export function useFamilyForm(start: FamilyDraft) {
   const serverFaults = ref<readonly FieldFault[]>([]);
 
   const kind = computed((): DetailKind => findKind(draft.kind) ?? (kinds[0] as DetailKind));
-  const read = computed(() => readDraft(draft, kind.value));
+  const read = computed(() => readDraft(draft, kind.value, catalogues.catalogue));
   const faults = computed(() => [...read.value.faults, ...serverFaults.value]);
   const counts = computed(() => countsOf(read.value.settings, read.value.angles, draft.senses.length));
   const tooLarge = computed(() => refusalOf(counts.value));

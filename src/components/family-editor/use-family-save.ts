@@ -1,3 +1,4 @@
+import type { Fault } from '@shared/contracts/common.ts';
 import type { Family } from '@shared/contracts/families.ts';
 import type { Revision } from '@shared/contracts/revisions.ts';
 import { ref, shallowRef, toRaw } from 'vue';
@@ -7,6 +8,7 @@ import { fetchRevision, saveDefinition } from '../../api/revisions.ts';
 import { useTask } from '../../composables/use-task.ts';
 import { differencesOf, merged, type Difference } from './differences.ts';
 import { draftOf, type FamilyDraft } from './draft.ts';
+import type { FieldFault } from './read-draft.ts';
 import type { FamilyForm } from './use-family-form.ts';
 
 interface Stored {
@@ -89,6 +91,7 @@ export function useFamilySave(form: FamilyForm, start: Stored) {
 }
 
 /** `definition.parameters.pitch.to` is the form's `pitch.to`. */
-function toField({ field, message }: { field: string; message: string }) {
-  return { field: field.replace(/^(definition\.)?(parameters\.)?/, ''), message };
+function toField({ field, message, place }: Fault): FieldFault {
+  const own = field.replace(/^(definition\.)?(parameters\.)?/, '');
+  return { field: own, message, ...(place ? { place } : {}) };
 }

@@ -29,7 +29,14 @@ export function usePreview({ kind, basis, read, factors, catalogue }: Sources) {
     held.value = !complete.value;
     if (!catalogue.value || !complete.value) return;
     const values = sampleValues(read.value.settings, sample.value);
-    preview.value = previewOf(kind.value, basis.value, catalogue.value, factors.value, values, sense.value);
+    const inputs = {
+      kind: kind.value,
+      basis: basis.value,
+      catalogue: catalogue.value,
+      factors: factors.value,
+      formulas: read.value.formulas,
+    };
+    preview.value = previewOf(inputs, values, sense.value);
   }
   function soon(): void {
     frame ||= requestAnimationFrame(compute);

@@ -10,7 +10,7 @@ export interface DefinitionLine {
   readonly symbol: string;
   readonly unit: string;
   readonly text: string;
-  /** How many values it takes; 1 for a fixed one. */
+  /** How many values it takes: 1 for a fixed one, 0 for one that is derived from others. */
   readonly values: number;
 }
 
@@ -20,6 +20,7 @@ const range = ({ from, to, step }: { from: number; to: number; step: number }) =
 
 function textOf(kind: string, name: string, setting: ParameterSetting): string {
   if (setting.mode === 'range') return range(setting);
+  if (setting.mode === 'derived') return `= ${setting.expression}`;
   return valuesOf(setting)
     .map((value) => valueTitle(kind, name, value))
     .join(', ');

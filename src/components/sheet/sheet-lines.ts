@@ -21,6 +21,8 @@ export interface GivenLine {
   readonly symbol: string;
   readonly value: string;
   readonly unit: string;
+  /** What a derived value follows from. */
+  readonly expression: string | null;
 }
 
 /** The given parameters by group; a group that this page does not know comes last under its own name. */
@@ -34,12 +36,13 @@ export function givenGroups(parameters: Sheet['parameters'], kind: string) {
       title,
       lines: parameters
         .filter(({ group }) => group === id)
-        .map(({ name, label, symbol, unit, value }): GivenLine => ({
+        .map(({ name, label, symbol, unit, value, expression }): GivenLine => ({
           name,
           label,
           symbol,
           unit: unitAfter(kind, name, value, unit),
           value: valueTitle(kind, name, value),
+          expression,
         })),
     }))
     .filter(({ lines }) => lines.length > 0);
