@@ -35,8 +35,12 @@ export async function pickTyped(page: Page, label: string, option: string): Prom
 }
 
 /** Turns a parameter of the editor from fixed to another mode. */
-export async function sweepBy(page: Page, parameter: string, mode: 'List' | 'From–to'): Promise<void> {
-  const group = page.getByRole('group', { name: `${parameter}: fixed or swept` });
+export async function sweepBy(
+  page: Page,
+  parameter: string,
+  mode: 'List' | 'From–to' | 'Derived',
+): Promise<void> {
+  const group = page.getByRole('group', { name: new RegExp(`^${parameter}: fixed`) });
   await group.getByRole('radio', { name: mode }).check();
 }
 

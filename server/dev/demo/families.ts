@@ -14,6 +14,7 @@ export interface DemoFamily {
 }
 
 const fixed = (value: ParameterValue): ParameterSetting => ({ mode: 'fixed', value });
+const derived = (expression: string): ParameterSetting => ({ mode: 'derived', expression });
 const list = (...values: ParameterValue[]): ParameterSetting => ({ mode: 'list', values });
 const range = (from: number, to: number, step: number): ParameterSetting => ({
   mode: 'range',
@@ -225,9 +226,17 @@ export const demoFamilies: readonly DemoFamily[] = [
         weld_leg: fixed(6),
         bolt_size: list('M16', 'M20'),
         rows: list(2, 3),
+        pitch: derived('ceil(3 * bolt_d, 5)'),
+        gusset_end_distance: derived('ceil(2 * bolt_d, 5)'),
         first_row: fixed(140),
         section: list('L70x70x7', 'L80x80x8'),
       },
+      rules: [
+        {
+          expression: 'section_long_leg >= 4 * bolt_d',
+          message: 'The leg is too narrow for the bolt and its washer',
+        },
+      ],
       angles: { mode: 'range', from: -60, to: 60, step: 10 },
       senses: ['tension'],
     },

@@ -5,6 +5,7 @@ import { useCatalogueStore } from '../../stores/catalogue.ts';
 import { isOfOtherKind, ofKind } from './change-kind.ts';
 import { countsOf, refusalOf } from './counts.ts';
 import type { FamilyDraft } from './draft.ts';
+import { provideExpressions } from './expression-context.ts';
 import { readDraft, type FieldFault } from './read-draft.ts';
 import { usePreview } from './use-preview.ts';
 
@@ -28,6 +29,8 @@ export function useFamilyForm(start: FamilyDraft) {
     return read.value.definition?.factors ?? own;
   });
   const live = usePreview({ kind, basis, read, factors, catalogue: computed(() => catalogues.catalogue) });
+
+  provideExpressions({ kind, draft, read, live, catalogue: computed(() => catalogues.catalogue) });
 
   /** Lays another draft into the form. */
   function take(other: FamilyDraft): void {
