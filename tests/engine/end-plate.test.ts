@@ -8,6 +8,7 @@ import {
   type PreparedDetail,
   toRadians,
 } from '@shared/engine/index.ts';
+import { endPlateValues } from './support/end-plate-values.ts';
 import { catalogue } from './support/gusset.ts';
 
 const kind = findKind('end-plate')!;
@@ -158,34 +159,7 @@ describe('AISC 360-22, LRFD', () => {
   });
 });
 
-const wide: Readonly<Record<string, readonly [number, number]>> = {
-  support_thickness: [0, 30],
-  plate_thickness: [8, 20],
-  plate_width: [170, 260],
-  plate_end_distance: [38, 60],
-  weld_leg: [6, 12],
-  rows: [2, 4],
-  pitch: [65, 90],
-  gauge: [90, 130],
-  hole_diameter: [0, 0],
-  beam_top_to_row: [0, 0],
-};
-const values = fc.record(
-  Object.fromEntries(
-    kind.parameters.map((spec) => {
-      const [min, max] = wide[spec.name] ?? [spec.minimum ?? 0, spec.maximum ?? 0];
-      if (spec.type === 'count') return [spec.name, fc.integer({ min, max })];
-      if (spec.type === 'length') return [spec.name, fc.double({ min, max, noNaN: true })];
-      if (spec.type === 'choice')
-        return [spec.name, fc.constantFrom(...spec.choices!.map(({ value }) => value))];
-      if (spec.type === 'section') return [spec.name, fc.constantFrom('IPE500', 'UB610x229x125', 'W24x76')];
-      if (spec.type === 'steel') return [spec.name, fc.constantFrom('S235', 'S275', 'S355')];
-      if (spec.type === 'boltSize') return [spec.name, fc.constantFrom('M16', 'M20')];
-      if (spec.type === 'boltGrade') return [spec.name, fc.constantFrom('8.8', '10.9')];
-      return [spec.name, fc.constant(spec.default)];
-    }),
-  ),
-);
+const values = endPlateValues(false);
 const basis = fc.constantFrom(...bases.map(({ id }) => id));
 const degrees = fc.double({ min: -90, max: 90, noNaN: true });
 const easy = { fit_checks: 'waived', practice_rules: 'waived', exposure: 'sheltered' };

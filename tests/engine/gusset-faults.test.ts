@@ -42,6 +42,8 @@ describe('absurd input is a fault of its field', () => {
     ['section', { shape: 'angle', longLeg: 80, shortLeg: 100, thickness: 8 }],
     ['section', { shape: 'angle', longLeg: 100, shortLeg: 100, thickness: 60 }],
     ['section', { shape: 'flat', width: 100, thickness: 10, area: 5000 }],
+    ['section', { shape: 'flat', width: 100, thickness: 10, area: 800 }],
+    ['section', { shape: 'angle', longLeg: 100, shortLeg: 100, thickness: 10, area: 1500 }],
     ['section', 'IPE300'],
     ['section', { shape: 'i', depth: 300, width: 150, webThickness: 7, flangeThickness: 11 }],
     ['section', { shape: 'i', depth: 300, width: 150, webThickness: 7, flangeThickness: 160 }],

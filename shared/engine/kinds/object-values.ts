@@ -124,6 +124,9 @@ function checkBoltSize(numbers: Numbers): ObjectRead {
   return { value: { d, stressArea } satisfies Omit<BoltSize, 'name'> };
 }
 
+/** An area below this share of what the lengths give is a slip of the pen, not a rounding of a table. */
+const LEAST_SHARE = 0.9;
+
 /** Share of the square of a radius that a root fillet adds to a corner. */
 const CORNER = 1 - Math.PI / 4;
 
@@ -135,6 +138,7 @@ function checkAngle(numbers: Numbers): ObjectRead {
   const computed = (longLeg + shortLeg - thickness) * thickness + (CORNER * rootRadius * rootRadius) / 2;
   const { area = computed } = numbers;
   if (area > (longLeg + shortLeg) * thickness * 1.1) return { fault: 'area exceeds what the legs can hold' };
+  if (area < LEAST_SHARE * computed) return { fault: smallArea('the legs', computed) };
   const { centroidLong, centroidShort } = numbers;
   if ((centroidLong ?? 0) >= shortLeg || (centroidShort ?? 0) >= longLeg) {
     return { fault: 'centroidLong must lie within the short leg and centroidShort within the long leg' };
@@ -152,11 +156,18 @@ function checkAngle(numbers: Numbers): ObjectRead {
   return { value };
 }
 
+function smallArea(parts: string, area: number): string {
+  return `area is below what ${parts} give; about ${area.toFixed(0)} mm² is accepted`;
+}
+
 function checkFlat(numbers: Numbers): ObjectRead {
   const { width = 0, thickness = 0 } = numbers;
   if (thickness > width) return { fault: 'thickness must not exceed width' };
   const { area = width * thickness } = numbers;
   if (area > width * thickness * 1.001) return { fault: 'area exceeds width times thickness' };
+  if (area < LEAST_SHARE * width * thickness) {
+    return { fault: smallArea('width times thickness', width * thickness) };
+  }
   return { value: { shape: 'flat', width, thickness, area } satisfies Omit<FlatSection, 'name'> };
 }
 
@@ -168,6 +179,7 @@ function checkI(numbers: Numbers): ObjectRead {
   const computed = 2 * width * flangeThickness + web * webThickness + 4 * CORNER * rootRadius * rootRadius;
   const { area = computed } = numbers;
   if (area > computed * 1.1) return { fault: 'area exceeds what web and flanges can hold' };
+  if (area < LEAST_SHARE * computed) return { fault: smallArea('web and flanges', computed) };
   const value: Omit<ISection, 'name'> = {
     shape: 'i',
     depth,

@@ -89,7 +89,9 @@ export function blocksTogether(along: number, across: number, cos: number, sin: 
   if (rec !== null) {
     const method = 'method of this catalogue';
     rec.line('R_V', 'block torn along the face', 'the least', along, 'N', '');
-    rec.line('R_N', 'block torn across the face', 'the least', across, 'N', '');
+    // A single row between no free edges has no block in bases without a tear-out of their own.
+    if (across < Infinity) rec.line('R_N', 'block torn across the face', 'the least', across, 'N', '');
+    else rec.line('R_N', 'block torn across the face', '', 'there is none', '', '');
     rec.line('', 'together', '√((V/R_V)² + (N/R_N)²) ≤ 1', 'as the root of the sum of squares', '', method);
   }
   return byBoth(along, across, cos, sin);
