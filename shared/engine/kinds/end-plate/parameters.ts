@@ -44,7 +44,7 @@ const plateParameters: readonly ParameterSpec[] = [
   },
   length('plate_thickness', 'Plate thickness', 't_p', 'plate', [3, 60, 10], 'Thickness of the end plate.'),
   { ...plateSteel, default: 'S275' },
-  length('plate_width', 'Plate width', 'b_p', 'plate', [50, 1000, 150], 'Across the beam.'),
+  length('plate_width', 'Plate width', 'b_p', 'plate', [50, 1000, 160], 'Across the beam.'),
   length(
     'plate_end_distance',
     'End distance on the plate',
