@@ -124,3 +124,45 @@ test('two managers at once: the second to save chooses field by field, and nothi
   expect(await value(manager, 'Plate thickness')).toBe('24');
   expect(await value(manager, 'Pitch')).toBe('80');
 });
+
+test("the load's arrow in the drawing is dragged round to set the angle, as far as the kind allows", async () => {
+  await manager.goto('/families/new');
+  const drawing = manager.getByRole('img', { name: /^Drawing to scale: plate 12 mm thick, 3 bolts/ });
+  const typed = () => manager.getByRole('textbox', { name: 'Load angle' }).inputValue();
+  const grip = drawing.locator('circle[aria-hidden]');
+  const box = (await grip.boundingBox())!;
+  await manager.mouse.move(box.x + box.width / 2, box.y + box.height / 2);
+  await manager.mouse.down();
+  // The sheet is fitted to the turned detail, so the place where the load acts is asked for again before each move.
+  const dragTo = async (degrees: number) => {
+    const acts = await grip.evaluate((circle: SVGCircleElement) => {
+      const { x, y } = new DOMPoint(0, 0).matrixTransform(circle.getScreenCTM()!);
+      return { x, y };
+    });
+    const theta = (degrees * Math.PI) / 180;
+    await manager.mouse.move(acts.x + 150 * Math.cos(theta), acts.y - 150 * Math.sin(theta));
+    return typed();
+  };
+  await expect.poll(() => dragTo(35)).toBe('35');
+  await manager.getByRole('img', { name: /load at 35°/ }).waitFor();
+  expect(await manager.getByRole('slider', { name: 'Load angle' }).getAttribute('aria-valuenow')).toBe('35');
+  await expect.poll(() => dragTo(-89)).toBe('-80');
+  await manager.mouse.up();
+  await manager.mouse.move(box.x, box.y);
+  expect(await typed()).toBe('-80');
+});
+
+test('a 0 that is no size says what it means; a kind that only pulls offers no push', async () => {
+  await manager.goto('/families/new');
+  const hole = manager.locator('.v-text-field').filter({ has: manager.getByLabel('Hole diameter') });
+  await hole.getByText('normal hole', { exact: true }).waitFor();
+  await type(manager, 'Hole diameter', '22');
+  await hole.getByText('mm', { exact: true }).waitFor();
+  const push = manager.getByRole('button', { name: 'Compression', exact: true });
+  await push.click();
+  await manager.getByRole('combobox', { name: 'Kind of detail' }).click({ force: true });
+  await manager.getByRole('option', { name: 'Fin plate' }).click();
+  await expect.poll(() => push.count()).toBe(0);
+  await manager.getByRole('img', { name: /^Drawing to scale: plate 10 mm thick, 4 bolts/ }).waitFor();
+  await manager.getByText('Bolt group in shear', { exact: true }).first().waitFor();
+});

@@ -22,6 +22,10 @@ export function usePreview({ kind, basis, read, factors, catalogue }: Sources) {
   const held = ref(false);
   let frame = 0;
 
+  watch(kind, ({ senses }) => {
+    if (!senses.includes(sense.value)) sense.value = senses[0] ?? 'tension';
+  });
+
   const complete = computed(() => read.value.faults.every(({ field }) => /^(angles|senses)/.test(field)));
 
   function compute(): void {
