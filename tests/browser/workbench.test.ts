@@ -128,17 +128,19 @@ test('two managers at once: the second to save chooses field by field, and nothi
 test("the load's arrow in the drawing is dragged round to set the angle, as far as the kind allows", async () => {
   await manager.goto('/families/new');
   const drawing = manager.getByRole('img', { name: /^Drawing to scale: plate 12 mm thick, 3 bolts/ });
-  const typed = () => manager.getByRole('textbox', { name: 'Load angle' }).inputValue();
+  const typed = () => manager.getByRole('textbox', { name: 'Load angle', exact: true }).inputValue();
   const grip = drawing.locator('circle[aria-hidden]');
   const box = (await grip.boundingBox())!;
   await manager.mouse.move(box.x + box.width / 2, box.y + box.height / 2);
   await manager.mouse.down();
   // The sheet is fitted to the turned detail, so the place where the load acts is asked for again before each move.
   const dragTo = async (degrees: number) => {
-    const acts = await grip.evaluate((circle: SVGCircleElement) => {
-      const { x, y } = new DOMPoint(0, 0).matrixTransform(circle.getScreenCTM()!);
-      return { x, y };
-    });
+    const [cx = 0, cy = 0, r = 1] = await Promise.all(
+      ['cx', 'cy', 'r'].map(async (name) => Number(await grip.getAttribute(name))),
+    );
+    const now = (await grip.boundingBox())!;
+    const pixels = now.width / (2 * r);
+    const acts = { x: now.x + (r - cx) * pixels, y: now.y + (r - cy) * pixels };
     const theta = (degrees * Math.PI) / 180;
     await manager.mouse.move(acts.x + 150 * Math.cos(theta), acts.y - 150 * Math.sin(theta));
     return typed();
